@@ -20,12 +20,12 @@ public sealed record BlendRule
     /// <exception cref="ArgumentOutOfRangeException">Outside 1 to 10 or not a number.</exception>
     public double AssistingExponent { get; init => field = Exponent(value, nameof(AssistingExponent)); } = 3;
 
-    /// <summary>Exponent for opposing flow, and for fluxes that point opposite ways; 1.5 to 10. The default is 3.</summary>
-    /// <exception cref="ArgumentOutOfRangeException">Outside 1.5 to 10 or not a number.</exception>
+    /// <summary>Exponent for opposing flow, and for fluxes that point opposite ways; 2 to 10. The default is 3.</summary>
+    /// <exception cref="ArgumentOutOfRangeException">Outside 2 to 10 or not a number.</exception>
     public double OpposingExponent
     {
         get;
-        init => field = Require.Within(value, 1.5, 10, "Exponent of a blend", string.Empty, nameof(OpposingExponent));
+        init => field = Require.Within(value, 2, 10, "Exponent of a blend", string.Empty, nameof(OpposingExponent));
     }
         = 3;
 

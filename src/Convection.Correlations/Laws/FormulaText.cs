@@ -28,6 +28,16 @@ internal static class FormulaText
         _ => string.Empty,
     };
 
+    public static string Name(DrivingVariable variable) => variable switch
+    {
+        DrivingVariable.TemperatureDifference => "a temperature difference",
+        DrivingVariable.AirChangeRate => "a supply flow",
+        DrivingVariable.JetMomentum => "a supply flow through an opening of known area",
+        DrivingVariable.FlowPerLength => "a supply flow per length of façade",
+        DrivingVariable.Speed => "a speed",
+        _ => "nothing",
+    };
+
     public static string Unit(DrivingVariable variable) => variable switch
     {
         DrivingVariable.TemperatureDifference => "K",

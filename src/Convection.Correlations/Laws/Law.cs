@@ -14,6 +14,9 @@ public abstract class Law
     /// <summary>The law as a formula, starting with "h =" in W/(m²·K) or with "Nu =".</summary>
     public abstract string Formula { get; }
 
+    /// <summary>True where the formula gives a Nusselt number and takes its numbers from the air itself.</summary>
+    public bool IsDimensionless => Formula.StartsWith("Nu", System.StringComparison.Ordinal);
+
     /// <summary>Turns the law into the numbers for one surface and its air.</summary>
     /// <param name="binding">Lengths, tilt, volume and air.</param>
     /// <returns>The bound law.</returns>

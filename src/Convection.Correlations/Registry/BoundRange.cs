@@ -31,6 +31,12 @@ internal sealed class BoundRange
 
     public double ExtendedHigh { get; private set; } = double.PositiveInfinity;
 
+    /// <summary>Lower end of where the law may serve: the extended limit where there is one, else the advised one.</summary>
+    public double UsableLow => ExtendedLow < TestedLow ? ExtendedLow : AdvisedLow;
+
+    /// <summary>Upper end of where the law may serve.</summary>
+    public double UsableHigh => ExtendedHigh > TestedHigh ? ExtendedHigh : AdvisedHigh;
+
     /// <summary>Limits on tilt, height and the like that this surface breaks, in words.</summary>
     public IReadOnlyList<string> Violations => violations;
 

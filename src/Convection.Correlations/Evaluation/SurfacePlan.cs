@@ -1,0 +1,109 @@
+using System;
+using System.Collections.Generic;
+using Convection.Correlations.Flows;
+using Convection.Correlations.Registry;
+using Convection.Correlations.Rooms;
+using Convection.Correlations.Selection;
+using Convection.Correlations.Surfaces;
+
+namespace Convection.Correlations.Evaluation;
+
+/// <summary>A surface's choice turned into what evaluation runs through.</summary>
+internal sealed class SurfacePlan
+{
+    private const int MostLaws = 64;
+
+    private readonly RoomSelection room;
+    private readonly List<CorrelationId> ids = [];
+    private readonly LawUse? warmer, cooler;
+
+    public SurfacePlan(RoomSelection room, SurfaceSelection selection)
+    {
+        this.room = room;
+        Selection = selection;
+        var heaters = new List<HeaterPlan>();
+        var forced = new List<ForcedPlan>();
+        var touched = new SortedSet<int>();
+        (warmer, cooler) = Uses(PartKind.StillAir, null);
+        for (int device = 0; device < Room.Devices.Count; device++)
+        {
+            FlowDescriptor descriptor = Room.Devices[device];
+            (LawUse? warm, LawUse? cool) = Uses(PartKind.Heater, descriptor);
+            if (warm is not null || cool is not null)
+            {
+                heaters.Add(new HeaterPlan(device, warm, cool));
+                touched.Add(device);
+            }
+
+            (warm, cool) = Uses(PartKind.Forced, descriptor);
+            if ((warm ?? cool) is { } one)
+            {
+                forced.Add(new ForcedPlan(device, Room, one.Ladder[0].Law.DrivenBy, warm, cool, descriptor.StreamAlong(Surface)));
+                touched.Add(device);
+            }
+        }
+
+        foreach (SelectionGap gap in selection.Gaps)
+        {
+            if (gap.Device is { } device)
+            {
+                touched.Add(IndexOf(device));
+            }
+        }
+
+        Heaters = [.. heaters];
+        Forced = [.. forced];
+        Devices = [.. touched];
+        Ids = [.. ids];
+        if (Ids.Length > MostLaws)
+        {
+            throw new ArgumentException(
+                "Surface '" + Surface.Name + "' would need " + Ids.Length + " correlations at once; at most " + MostLaws
+                + " are possible. Describe fewer devices.",
+                nameof(room));
+        }
+    }
+
+    public RoomContext Room => room.Room;
+
+    public SurfaceSelection Selection { get; }
+
+    public SurfaceContext Surface => Selection.Surface;
+
+    public HeaterPlan[] Heaters { get; }
+
+    public ForcedPlan[] Forced { get; }
+
+    /// <summary>The devices that this surface feels.</summary>
+    public int[] Devices { get; }
+
+    /// <summary>The correlations that results may name, by bit.</summary>
+    public CorrelationId[] Ids { get; }
+
+    public LawUse? StillAir(bool isWarmer) => isWarmer ? warmer : cooler;
+
+    public int IndexOf(FlowDescriptor device) => Room.IndexOfDevice(device.Name);
+
+    private (LawUse? Warmer, LawUse? Cooler) Uses(PartKind kind, FlowDescriptor? device)
+    {
+        LawUse? warm = null, cool = null;
+        foreach (SelectedPart part in Selection.Parts)
+        {
+            if (part.Kind != kind || part.Device?.Name != device?.Name)
+            {
+                continue;
+            }
+
+            var use = new LawUse(part.Ladder, room.Policy.OutOfRange, kind == PartKind.Forced, room.IsScaledToAir, ids.Count);
+            foreach (SelectedLaw law in part.Chosen)
+            {
+                ids.Add(law.Correlation.Id);
+            }
+
+            warm = part.Side == SurfaceSide.Cooler ? warm : use;
+            cool = part.Side == SurfaceSide.Warmer ? cool : use;
+        }
+
+        return (warm, cool);
+    }
+}
