@@ -55,7 +55,8 @@ public readonly record struct AirState
     /// </summary>
     /// <remarks>
     /// Density: CIPM-2007. Viscosity and conductivity of dry air: Lemmon &amp; Jacobsen 2004; of vapour: IAPWS 2008 and 2011,
-    /// dilute gas; mixed by the rule of Wilke. Heat capacity: ideal-gas parts of Lemmon et al. 2000 and of IAPWS-95.
+    /// dilute gas; mixed by the rule of Wilke. Heat capacity: ideal-gas parts of Lemmon et al. 2000 and of IAPWS-95;
+    /// the real-gas part, 0.16 % at 300 K and 1 atm, is left out.
     /// Expansion coefficient: ideal gas, 1/T. Each file in this folder names its publication.
     /// </remarks>
     public AirProperties Properties => MoistAir.At(this);
