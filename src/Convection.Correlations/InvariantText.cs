@@ -40,6 +40,10 @@ internal static class InvariantText
 
     public static string Number(double value, string unit) => unit.Length == 0 ? Number(value) : Number(value) + " " + unit;
 
+    /// <summary>Up to three digits with an exponent, for dimensionless groups.</summary>
+    public static string Exponential(double value)
+        => value.ToString("0.##e0", CultureInfo.InvariantCulture);
+
     /// <summary>A fixed number of decimals, without a minus sign on zero.</summary>
     public static string Fixed(double value, int decimals)
     {
@@ -62,14 +66,16 @@ internal static class InvariantText
         => "(" + End(lowest, unit) + ", " + End(highest, unit) + "]";
 
     /// <summary>An interval in running text, open ends left out: "0.5 to 5 K", "from 3 1/h", "up to 9 K".</summary>
-    public static string Span(double lowest, double highest, string unit)
+    public static string Span(double lowest, double highest, string unit) => Span(lowest, highest, unit, Number);
+
+    public static string Span(double lowest, double highest, string unit, Func<double, string> write)
     {
         bool open = double.IsNegativeInfinity(lowest), endless = double.IsPositiveInfinity(highest);
         string tail = unit.Length == 0 ? string.Empty : " " + unit;
         return open && endless ? "any"
-            : open ? "up to " + Number(highest) + tail
-            : endless ? "from " + Number(lowest) + tail
-            : Number(lowest) + " to " + Number(highest) + tail;
+            : open ? "up to " + write(highest) + tail
+            : endless ? "from " + write(lowest) + tail
+            : write(lowest) + " to " + write(highest) + tail;
     }
 
     private static string End(double value, string unit) => Number(value, unit);

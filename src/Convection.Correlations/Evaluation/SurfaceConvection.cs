@@ -249,11 +249,9 @@ public sealed class SurfaceConvection
         total = FluxBlend.Opposing(total, opposing, blend.OpposingExponent, blend.OpposingFloor);
         total = FluxBlend.Assisting(total, transverse, blend.TransverseExponent);
         Flux forced = FluxBlend.Assisting(FluxBlend.Assisting(assisting, opposing, blend.TransverseExponent), transverse, blend.TransverseExponent);
-        foreach (SelectionGap gap in plan.Selection.Gaps)
+        foreach (GapPlan gap in plan.Gaps)
         {
-            bool onThisSide = gap.Side == SurfaceSide.Either || (gap.Side == SurfaceSide.Warmer) == isWarmer;
-            bool inForce = gap.Device is null || IsRunning(devices[plan.IndexOf(gap.Device)]);
-            sum.Flags |= onThisSide && inForce ? ConvectionFlags.GapInEvidence : ConvectionFlags.None;
+            sum.Flags |= gap.IsOn(isWarmer) && (gap.Device < 0 || IsRunning(devices[gap.Device])) ? ConvectionFlags.GapInEvidence : ConvectionFlags.None;
         }
 
         bool opposite = sum.Buoyant.Value * forced.Value < 0;

@@ -43,14 +43,18 @@ internal sealed class SurfacePlan
             }
         }
 
+        var gaps = new List<GapPlan>();
         foreach (SelectionGap gap in selection.Gaps)
         {
-            if (gap.Device is { } device)
+            int device = gap.Device is null ? -1 : Room.IndexOfDevice(gap.Device.Name);
+            gaps.Add(new GapPlan(device, gap.Side));
+            if (device >= 0)
             {
-                touched.Add(IndexOf(device));
+                touched.Add(device);
             }
         }
 
+        Gaps = [.. gaps];
         Heaters = [.. heaters];
         Forced = [.. forced];
         Devices = [.. touched];
@@ -74,6 +78,8 @@ internal sealed class SurfacePlan
 
     public ForcedPlan[] Forced { get; }
 
+    public GapPlan[] Gaps { get; }
+
     /// <summary>The devices that this surface feels.</summary>
     public int[] Devices { get; }
 
@@ -81,8 +87,6 @@ internal sealed class SurfacePlan
     public CorrelationId[] Ids { get; }
 
     public LawUse? StillAir(bool isWarmer) => isWarmer ? warmer : cooler;
-
-    public int IndexOf(FlowDescriptor device) => Room.IndexOfDevice(device.Name);
 
     private (LawUse? Warmer, LawUse? Cooler) Uses(PartKind kind, FlowDescriptor? device)
     {

@@ -80,7 +80,7 @@ internal sealed class BoundRange
         if (!(limit.Extended ?? limit.Tested).Contains(value))
         {
             violations.Add(RangeText.Symbol(limit.Variable) + " " + InvariantText.Number(value, RangeText.Unit(limit.Variable))
-                + " is outside " + InvariantText.Interval(limit.Tested.Lowest, limit.Tested.Highest, RangeText.Unit(limit.Variable)));
+                + " is outside the tested " + InvariantText.Span(limit.Tested.Lowest, limit.Tested.Highest, RangeText.Unit(limit.Variable)));
         }
     }
 

@@ -55,13 +55,17 @@ public sealed record RangeLimit
     /// <summary>Why and by whom the interval is narrowed or widened, or other remarks.</summary>
     public string Note { get; init; } = string.Empty;
 
-    /// <summary>Name and interval in words, such as "Ra on 4A/P 1E+4 to 1E+12 (recalled)".</summary>
+    /// <summary>Name and interval in words, such as "Ra on 4A/P 1e4 to 1e12 (recalled)".</summary>
     /// <returns>The text, the same in every culture.</returns>
     public override string ToString()
     {
         string text = RangeText.Symbol(Variable)
             + (Length == CharacteristicLength.None ? string.Empty : " on " + RangeText.Name(Length))
-            + " " + InvariantText.Span(Tested.Lowest, Tested.Highest, RangeText.Unit(Variable));
+            + " " + InvariantText.Span(Tested.Lowest, Tested.Highest, RangeText.Unit(Variable), RangeText.Writer(Variable));
+        text += Advised is { } advised ? ", advised " + InvariantText.Span(advised.Lowest, advised.Highest, RangeText.Unit(Variable)) : string.Empty;
+        text += Extended is { } extended
+            ? ", used " + InvariantText.Span(extended.Lowest, extended.Highest, RangeText.Unit(Variable), RangeText.Writer(Variable))
+            : string.Empty;
         return Origin switch
         {
             RangeOrigin.Recalled => text + " (recalled)",

@@ -1,3 +1,4 @@
+using System;
 using Convection.Correlations.Laws;
 
 namespace Convection.Correlations.Registry;
@@ -31,6 +32,12 @@ internal static class RangeText
         RangeVariable.Height => "m",
         _ => string.Empty,
     };
+
+    /// <summary>Dimensionless groups of flow are written with an exponent, all else plainly.</summary>
+    public static Func<double, string> Writer(RangeVariable variable) => variable is RangeVariable.Rayleigh or RangeVariable.Grashof
+        or RangeVariable.ModifiedRayleigh or RangeVariable.Reynolds
+            ? InvariantText.Exponential
+            : InvariantText.Number;
 
     public static string Name(CharacteristicLength length) => length switch
     {

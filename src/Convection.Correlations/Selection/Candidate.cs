@@ -32,7 +32,7 @@ internal sealed class Candidate : IComparable<Candidate>
 
     public bool IsPinned { get; init; }
 
-    public bool IsNearMatch => scores[Ranking.Surface] == 1;
+    public bool IsNearMatch => scores[Ranking.Surface] is 1 or Ranking.Misfit;
 
     public int Score(int criterion) => scores[criterion];
 

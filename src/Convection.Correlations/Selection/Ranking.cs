@@ -11,6 +11,9 @@ internal static class Ranking
     public const int Preferred = 0, Driver = 1, Specific = 2, Surface = 3, Place = 4, InRange = 5, Evidence = 6, Text = 7, KnownRange = 8;
     public const int Criteria = 9;
 
+    /// <summary>Score of a pinned correlation on a criterion that it does not meet at all.</summary>
+    public const int Misfit = 9;
+
     /// <summary>Why the best one was chosen.</summary>
     public static string[] Praise(Candidate best, string nominal)
     {
@@ -25,14 +28,9 @@ internal static class Ranking
             reasons.Add("preferred by the policy");
         }
 
-        reasons.Add("made for " + Words(c.Applies.Driver) + (c.Applies.ConditionText.Length == 0 ? string.Empty : ", where " + c.Applies.ConditionText));
-        reasons.Add(best.IsNearMatch
-            ? "made for " + EvidenceText.Of(c.Applies.Surfaces) + ", the nearest to this surface"
-            : "made for " + EvidenceText.Of(c.Applies.Surfaces));
-        if (best.Score(Place) == 0)
-        {
-            reasons.Add("made for this place to the device");
-        }
+        reasons.Add("made for " + EvidenceText.Of(c.Applies.Surfaces) + Nearness(best)
+            + " and for " + Words(c.Applies.Driver) + (best.Score(Place) == 0 ? ", in this place to it" : string.Empty)
+            + (c.Applies.ConditionText.Length == 0 ? string.Empty : ", where " + c.Applies.ConditionText));
 
         if (best.NominalStanding is RangeStanding.Within or RangeStanding.Extended)
         {
@@ -51,6 +49,13 @@ internal static class Ranking
         reasons.Add(EvidenceText.Of(c.TextCheck));
         return [.. reasons];
     }
+
+    private static string Nearness(Candidate candidate) => candidate.Score(Surface) switch
+    {
+        1 => " (the nearest to this surface)",
+        Misfit => " (not for this surface)",
+        _ => string.Empty,
+    };
 
     /// <summary>Why another stands behind the best one: the first criterion that tells them apart.</summary>
     public static string Shortfall(Candidate other, Candidate best, string nominal)

@@ -27,6 +27,7 @@ internal static class SelectionText
             Write(text, surface, selection.Policy);
         }
 
+        WriteSources(text, selection);
         return text.ToString();
     }
 
@@ -67,7 +68,7 @@ internal static class SelectionText
 
         foreach (SelectionGap gap in surface.Gaps)
         {
-            text.Append("  Gap: ").Append(gap.Text).Append('\n');
+            TextWrap.Line(text, "  ", "Gap: " + gap.Text);
         }
     }
 
@@ -112,40 +113,60 @@ internal static class SelectionText
     private static void WriteLaw(StringBuilder text, LawLadder ladder, int i)
     {
         SelectedLaw law = ladder[i];
-        Correlation c = law.Correlation;
-        text.Append("    ").Append(c.Id).Append(":  ").Append(c.Law.Formula).Append("   [").Append(c.Publication.ShortName).Append("]\n");
-        if (i > 0)
-        {
-            (double low, double high) = ladder.Passage(i - 1);
-            text.Append("      takes over between ").Append(Symbol(law)).Append(' ')
-                .Append(InvariantText.Span(low, high, FormulaText.Unit(law.Law.DrivenBy))).Append(" in this room\n");
-        }
-
-        text.Append("      against ").Append(EvidenceText.Of(c.Reference)).Append("; ").Append(c.Range).Append('\n');
-        text.Append("      because: ").Append(string.Join("; ", law.Reasons)).Append('\n');
+        TextWrap.Line(text, "    ", law.Correlation.Id + ": " + string.Join("; ", law.Reasons));
         if (law.Violations.Count > 0)
         {
-            text.Append("      the surface is outside: ").Append(string.Join("; ", law.Violations)).Append('\n');
+            TextWrap.Line(text, "      ", "The surface is outside: " + string.Join("; ", law.Violations));
         }
 
-        foreach (string doubt in c.Doubts)
+        if (i + 1 < ladder.Count)
         {
-            text.Append("      doubt: ").Append(doubt).Append('\n');
+            (double low, double high) = ladder.Passage(i);
+            text.Append("      passes into the next over ").Append(FormulaText.Symbol(law.Law.DrivenBy)).Append(' ')
+                .Append(InvariantText.Span(low, high, FormulaText.Unit(law.Law.DrivenBy))).Append('\n');
         }
     }
-
-    private static string Symbol(SelectedLaw law) => FormulaText.Symbol(law.Law.DrivenBy);
 
     private static void WriteAlternatives(StringBuilder text, IReadOnlyList<Alternative> alternatives)
     {
         for (int i = 0; i < Math.Min(alternatives.Count, AlternativesShown); i++)
         {
-            text.Append("      not ").Append(alternatives[i].Correlation.Id).Append(": ").Append(alternatives[i].Reason).Append('\n');
+            TextWrap.Line(text, "      ", "rather than " + alternatives[i].Correlation.Id + ": " + alternatives[i].Reason);
         }
 
         if (alternatives.Count > AlternativesShown)
         {
-            text.Append("      nor ").Append(Count(alternatives.Count - AlternativesShown, "other")).Append('\n');
+            text.Append("      and ").Append(Count(alternatives.Count - AlternativesShown, "other")).Append('\n');
+        }
+    }
+
+    private static void WriteSources(StringBuilder text, RoomSelection selection)
+    {
+        var seen = new SortedDictionary<CorrelationId, Correlation>();
+        foreach (SurfaceSelection surface in selection.Surfaces)
+        {
+            foreach (SelectedPart part in surface.Parts)
+            {
+                foreach (SelectedLaw law in part.Chosen)
+                {
+                    seen[law.Correlation.Id] = law.Correlation;
+                }
+            }
+        }
+
+        text.Append("\nCorrelations chosen\n");
+        foreach (Correlation c in seen.Values)
+        {
+            text.Append("  ").Append(c.Id).Append("   ").Append(c.Title).Append('\n');
+            text.Append("    ").Append(c.Law.Formula).Append("   against ").Append(EvidenceText.Of(c.Reference)).Append('\n');
+            TextWrap.Line(text, "    ", "tested over: " + c.Range + "; uncertainty " + c.Evidence.Uncertainty);
+            TextWrap.Line(text, "    ", "evidence: " + c.Evidence.Setting + "; " + EvidenceText.Of(c.TextCheck));
+            foreach (string doubt in c.Doubts)
+            {
+                TextWrap.Line(text, "    ", "doubt: " + doubt);
+            }
+
+            TextWrap.Line(text, "    ", "source: " + c.Publication.Citation);
         }
     }
 }

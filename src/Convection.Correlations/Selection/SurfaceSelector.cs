@@ -12,7 +12,6 @@ namespace Convection.Correlations.Selection;
 internal sealed class SurfaceSelector
 {
     private const double PassiveNominalKelvins = 2, ActiveNominalKelvins = 5;
-    private const int Misfit = 9;
 
     private static readonly SurfaceSide[] Sides = [SurfaceSide.Warmer, SurfaceSide.Cooler];
     private static readonly StillAir NoDevice = new("still air");
@@ -242,8 +241,8 @@ internal sealed class SurfaceSelector
         if (pinned is not null)
         {
             usedPins.Add(pinned.Id);
-            int match = SurfaceForm.Match(pinned.Applies.Surfaces, surface) ?? Misfit;
-            admitted.Add(MakeCandidate(pinned, side, device, driverScore(pinned) ?? Misfit, match, isPinned: true));
+            int match = SurfaceForm.Match(pinned.Applies.Surfaces, surface) ?? Ranking.Misfit;
+            admitted.Add(MakeCandidate(pinned, side, device, driverScore(pinned) ?? Ranking.Misfit, match, isPinned: true));
         }
 
         if (admitted.Count == 0)
@@ -305,7 +304,7 @@ internal sealed class SurfaceSelector
     private bool Fits(Correlation c, SurfaceSide side, FlowDescriptor? device, out int match)
     {
         int? found = SurfaceForm.Match(c.Applies.Surfaces, surface);
-        match = found ?? Misfit;
+        match = found ?? Ranking.Misfit;
         return found is not null
             && FitsSide(c, side)
             && (c.Applies.Placement == Placement.Unspecified || device?.PlacementOf(surface.Name) == c.Applies.Placement)
