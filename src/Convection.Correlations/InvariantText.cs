@@ -38,7 +38,19 @@ internal static class InvariantText
         return text == "-0" ? "0" : text;
     }
 
-    public static string Number(double value, string unit) => unit.Length == 0 ? Number(value) : Number(value) + " " + unit;
+    public static string Number(double value, string unit) => unit.Length == 0 ? Number(value) : unit == "°" ? Number(value) + unit : Number(value) + " " + unit;
+
+    /// <summary>Three significant digits, for texts where more would pretend.</summary>
+    public static string Rounded(double value)
+    {
+        if (value == 0 || double.IsNaN(value) || double.IsInfinity(value))
+        {
+            return Number(value);
+        }
+
+        double unit = Math.Pow(10, Math.Floor(Math.Log10(Math.Abs(value))) - 2);
+        return Number(Math.Round(value / unit) * unit);
+    }
 
     /// <summary>Up to three digits with an exponent, for dimensionless groups.</summary>
     public static string Exponential(double value)

@@ -117,15 +117,14 @@ public readonly struct ConvectionResult : IEquatable<ConvectionResult>
     /// <summary>Share of the buoyant flux [-], 1 less the forced share.</summary>
     public double BuoyantShare => 1 - ForcedShare;
 
-    /// <summary>Heat flux, positive from the surface into the air.</summary>
-    public HeatFlux HeatFlux => HeatFlux.FromWattsPerSquareMeter(FluxWattsPerSquareMetre);
+    /// <summary>Heat flux, positive from the surface into the air; null where there is none, because quantities hold no NaN.</summary>
+    public HeatFlux? HeatFlux => IsValid ? UnitsNet.HeatFlux.FromWattsPerSquareMeter(FluxWattsPerSquareMetre) : null;
 
-    /// <summary>Coefficient of the larger part, against <see cref="Reference"/>.</summary>
-    public HeatTransferCoefficient Coefficient => HeatTransferCoefficient.FromWattsPerSquareMeterKelvin(CoefficientWattsPerSquareMetreKelvin);
+    /// <summary>Coefficient of the larger part, against <see cref="Reference"/>; null where there is none.</summary>
+    public HeatTransferCoefficient? Coefficient => Quantity(CoefficientWattsPerSquareMetreKelvin);
 
-    /// <summary>Coefficient referred to room air.</summary>
-    public HeatTransferCoefficient RoomAirCoefficient
-        => HeatTransferCoefficient.FromWattsPerSquareMeterKelvin(RoomAirCoefficientWattsPerSquareMetreKelvin);
+    /// <summary>Coefficient referred to room air; null where there is none.</summary>
+    public HeatTransferCoefficient? RoomAirCoefficient => Quantity(RoomAirCoefficientWattsPerSquareMetreKelvin);
 
     /// <summary>The correlations behind the numbers. Makes a list at each call.</summary>
     public IReadOnlyList<CorrelationId> Correlations
@@ -144,6 +143,9 @@ public readonly struct ConvectionResult : IEquatable<ConvectionResult>
             return list;
         }
     }
+
+    private static HeatTransferCoefficient? Quantity(double wattsPerSquareMetreKelvin)
+        => double.IsNaN(wattsPerSquareMetreKelvin) ? null : HeatTransferCoefficient.FromWattsPerSquareMeterKelvin(wattsPerSquareMetreKelvin);
 
     private bool ForcedLeads => Math.Abs(forced.Value) > Math.Abs(buoyant.Value);
 

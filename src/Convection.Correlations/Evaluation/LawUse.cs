@@ -28,7 +28,7 @@ internal sealed class LawUse
         }
 
         BoundRange low = ladder[0].Range, high = ladder[ladder.Count - 1].Range;
-        lowest = fadesBelow ? Math.Max(0, ladder.Lowest) : low.ExtendedLow;
+        lowest = fadesBelow ? Math.Max(0, low.ExtendedLow) : low.ExtendedLow;
         highest = high.ExtendedHigh;
         Reference = ladder[0].Correlation.Reference;
         ContainsBuoyancy = ladder[0].Correlation.ContainsBuoyancy;

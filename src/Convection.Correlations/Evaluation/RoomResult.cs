@@ -29,8 +29,8 @@ public sealed class RoomResult
     /// <summary>The energy closure of each running supply device whose forms refer to supply air.</summary>
     public IReadOnlyList<RoomClosure> Closures => closures;
 
-    /// <summary>Heat from all surfaces into the air; NaN where a surface has no flux.</summary>
-    public Power HeatToAir
+    /// <summary>Heat from all surfaces into the air [W], flux times area; NaN where a surface has no flux.</summary>
+    public double HeatToAirWatts
     {
         get
         {
@@ -40,9 +40,12 @@ public sealed class RoomResult
                 watts += surfaces[i].FluxWattsPerSquareMetre * Room.Surfaces[i].AreaSquareMetres;
             }
 
-            return Power.FromWatts(watts);
+            return watts;
         }
     }
+
+    /// <summary>Heat from all surfaces into the air; null where a surface has no flux.</summary>
+    public Power? HeatToAir => double.IsNaN(HeatToAirWatts) ? null : Power.FromWatts(HeatToAirWatts);
 
     /// <summary>The result of a surface.</summary>
     /// <param name="surface">Name of the surface.</param>

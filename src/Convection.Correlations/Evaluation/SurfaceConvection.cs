@@ -245,10 +245,10 @@ public sealed class SurfaceConvection
     private ConvectionResult Finish(Running sum, bool isWarmer, DeviceStates devices)
     {
         Flux assisting = sum.Assisting(blend), opposing = sum.Opposing(blend), transverse = sum.Transverse(blend);
-        Flux total = FluxBlend.Assisting(sum.Buoyant, assisting, blend.AssistingExponent);
+        Flux total = FluxBlend.Assisting(sum.Buoyant, assisting, blend.AssistingExponent, blend.OpposingExponent);
         total = FluxBlend.Opposing(total, opposing, blend.OpposingExponent, blend.OpposingFloor);
-        total = FluxBlend.Assisting(total, transverse, blend.TransverseExponent);
-        Flux forced = FluxBlend.Assisting(FluxBlend.Assisting(assisting, opposing, blend.TransverseExponent), transverse, blend.TransverseExponent);
+        total = FluxBlend.Assisting(total, transverse, blend.TransverseExponent, blend.OpposingExponent);
+        Flux forced = Pool(Pool(assisting, opposing, blend), transverse, blend);
         foreach (GapPlan gap in plan.Gaps)
         {
             sum.Flags |= gap.IsOn(isWarmer) && (gap.Device < 0 || IsRunning(devices[gap.Device])) ? ConvectionFlags.GapInEvidence : ConvectionFlags.None;
@@ -270,6 +270,10 @@ public sealed class SurfaceConvection
             plan.Ids,
             sum.Used);
     }
+
+    /// <summary>Forced fluxes of several devices or directions together.</summary>
+    private static Flux Pool(Flux one, Flux other, BlendRule blend)
+        => FluxBlend.Assisting(one, other, blend.TransverseExponent, blend.OpposingExponent);
 
     private static FlowRegime Regime(Running sum, double forced, double assisting, double opposing, double transverse)
     {
@@ -345,14 +349,15 @@ public sealed class SurfaceConvection
             MixedWeight = Math.Max(MixedWeight, weight);
         }
 
-        public readonly Flux Assisting(BlendRule blend) => BuoyancyRises ? Pool(up, upCold, blend) : Pool(down, downCold, blend);
+        public readonly Flux Assisting(BlendRule blend) => BuoyancyRises ? Both(up, upCold, blend) : Both(down, downCold, blend);
 
-        public readonly Flux Opposing(BlendRule blend) => BuoyancyRises ? Pool(down, downCold, blend) : Pool(up, upCold, blend);
+        public readonly Flux Opposing(BlendRule blend) => BuoyancyRises ? Both(down, downCold, blend) : Both(up, upCold, blend);
 
-        public readonly Flux Transverse(BlendRule blend) => Pool(across, acrossCold, blend);
+        public readonly Flux Transverse(BlendRule blend) => Both(across, acrossCold, blend);
 
-        private static void Add(ref Flux pool, Flux flux, BlendRule blend) => pool = FluxBlend.Assisting(pool, flux, blend.TransverseExponent);
+        private static Flux Both(Flux warm, Flux cold, BlendRule blend) => Pool(warm, cold, blend);
 
-        private static Flux Pool(Flux warm, Flux cold, BlendRule blend) => FluxBlend.Assisting(warm, cold, blend.OpposingExponent);
+        private static void Add(ref Flux pool, Flux flux, BlendRule blend) => pool = Pool(pool, flux, blend);
+
     }
 }

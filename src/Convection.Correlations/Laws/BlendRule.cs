@@ -4,9 +4,11 @@ namespace Convection.Correlations.Laws;
 
 /// <summary>How a buoyant and a forced flux on one surface make one.</summary>
 /// <remarks>
-/// S.W. Churchill, AIChE Journal 23(1), 10–16, 1977: the cube of the flux is the sum of the cubes for assisting and
-/// transverse flow, their difference for opposing flow; exponents 3 to 4 are quoted there, and between those the worst
-/// difference is 6 %. The lower bound of 0.8 times the larger part in opposing flow comes from
+/// S.W. Churchill, AIChE Journal 23(1), 10–16, 1977: Nuⁿ is the sum of the two parts' powers for assisting and transverse
+/// flow, their difference for opposing flow; exponents 3 to 4 are quoted in an encyclopaedia article, and between those the
+/// worst difference is 6 %. Here fluxes are blended, because the parts may refer to unlike temperatures. Subtraction belongs to
+/// laminar flow: in turbulent flow along a wall, assisting buoyancy can impair and opposing buoyancy enhance the heat transfer
+/// (known from vertical tubes; recalled, high). The lower bound of 0.8 times the larger part in opposing flow comes from
 /// I. Beausoleil-Morrison, Energy and Buildings 33(4), 351–361, 2001 (recalled, high): a guard against cancellation, not a
 /// measured minimum. Where the two fluxes point opposite ways, because the surface is between room and supply temperature,
 /// no published rule is known; the library's own is documented with the room evaluation.
@@ -20,7 +22,7 @@ public sealed record BlendRule
     /// <exception cref="ArgumentOutOfRangeException">Outside 1 to 10 or not a number.</exception>
     public double AssistingExponent { get; init => field = Exponent(value, nameof(AssistingExponent)); } = 3;
 
-    /// <summary>Exponent for opposing flow, and for fluxes that point opposite ways; 2 to 10. The default is 3.</summary>
+    /// <summary>Exponent for opposing flow, and for all fluxes that point opposite ways; 2 to 10. The default is 3; at 2 slopes have kinks.</summary>
     /// <exception cref="ArgumentOutOfRangeException">Outside 2 to 10 or not a number.</exception>
     public double OpposingExponent
     {

@@ -5,7 +5,7 @@ namespace Convection.Correlations.Laws;
 /// <summary>A law bound to one surface and its air: a few numbers, ready to evaluate.</summary>
 /// <remarks>
 /// Immutable, allocation-free to evaluate, safe on any number of threads. Where a piecewise law jumps, the pieces pass into
-/// one another over 2 % of the driving variable to either side of the joint; outside that band the law is as published.
+/// one another over 2 % of the driving variable to either side of the joint, less where joints are close; outside that band the law is as published.
 /// </remarks>
 public sealed class BoundLaw
 {
@@ -51,7 +51,8 @@ public sealed class BoundLaw
 
         for (int i = 0; i < joints.Length; i++)
         {
-            double low = joints[i] * (1 - JointHalfWidth), high = joints[i] * (1 + JointHalfWidth);
+            double low = Math.Max(joints[i] * (1 - JointHalfWidth), i == 0 ? 0 : Math.Sqrt(joints[i - 1] * joints[i]));
+            double high = Math.Min(joints[i] * (1 + JointHalfWidth), i + 1 == joints.Length ? double.PositiveInfinity : Math.Sqrt(joints[i] * joints[i + 1]));
             if (x < low)
             {
                 return pieces[i].Evaluate(x);

@@ -4,7 +4,8 @@ namespace Convection.Correlations.Laws;
 
 /// <summary>h = c0 + c1·Xʳ, X being the flow variable that the source used.</summary>
 /// <remarks>
-/// In air other than the laboratory's the whole law is scaled as k·Pr^(1/3)/νʳ (Reynolds scaling).
+/// In air other than the laboratory's the whole law is scaled as k·Pr^(1/3)/νʳ (Reynolds scaling), with 2r in place of r for the jet
+/// momentum number, which goes with the square of the flow.
 /// </remarks>
 public sealed class FlowLaw : Law
 {
@@ -48,6 +49,6 @@ public sealed class FlowLaw : Law
     internal override BoundLaw BindTo(LawBinding binding)
     {
         NormalForm printed = Intercept == 0 ? new NormalForm(Slope, Exponent) : new NormalForm(Intercept, 0, Slope, Exponent, 1);
-        return new BoundLaw(DrivenBy, printed.Times(binding.ForcedScale(Exponent)));
+        return new BoundLaw(DrivenBy, printed.Times(binding.ForcedScale(DrivenBy == DrivingVariable.JetMomentum ? 2 * Exponent : Exponent)));
     }
 }

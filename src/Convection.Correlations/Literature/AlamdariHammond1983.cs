@@ -10,7 +10,7 @@ namespace Convection.Correlations.Literature;
 /// </summary>
 /// <remarks>
 /// <para>
-/// Measured: nothing of the authors' own. Published laboratory data of plates, pooled, and joined by the rule of Churchill
+/// Measured: no full-scale room of the authors' own. Published laboratory data, pooled, and joined by the rule of Churchill
 /// and Usagi with exponent 6, so that one expression runs from laminar to turbulent flow.
 /// </para>
 /// <para>Symbols: |ΔT| surface against room air [K], H height [m], Dh = 4A/P hydraulic diameter [m], h in W/(m²·K).</para>
@@ -83,8 +83,8 @@ internal static class AlamdariHammond1983
             Reference = ReferenceTemperature.RoomAir,
             Length = length,
             Range = new(new RangeLimit(RangeVariable.Rayleigh, new(1e4, 1e12), RangeOrigin.Recalled, length)),
-            Evidence = new(EvidenceKind.Plate, "pooled laboratory data of plates, joined by the rule of Churchill and Usagi; not a room experiment"),
+            Evidence = new(EvidenceKind.Plate, "pooled laboratory data, joined by the rule of Churchill and Usagi; not a room experiment"),
             TextCheck = TextCheck.Reconstructed,
-            Doubts = [.. doubts, "Range and reference temperature are recalled (medium), not compared with print."],
+            Doubts = [.. doubts, "Range and reference temperature are recalled (medium), not compared with print.", "The paper does not treat tilted surfaces (recalled, high)."],
         };
 }

@@ -21,7 +21,7 @@ namespace Convection.Correlations.Literature;
 /// <para>
 /// Check: the length exponents obey 3n − 1; for wall and floor the Nusselt form recalled apart agrees within 3 %. For the
 /// ceiling it does not: 0.704 stands 28 % above what 1.78 Gr^0.133 gives. The dimensional form is kept, being the more widely
-/// printed one, and flagged. As h falls with Dh^0.6 it must not be used for large ceilings.
+/// printed one, and flagged. As h goes with Dh^(−0.6) it must not be used for large ceilings.
 /// </para>
 /// </remarks>
 internal static class AwbiHatton1999
@@ -52,7 +52,7 @@ internal static class AwbiHatton1999
             1e11,
             TextCheck.RecalledMedium,
             "The constant is in conflict: the Nusselt form 1.78 Gr^0.133 gives 0.545 to 0.550 in its place, 22 % less.",
-            "Not for large ceilings: the coefficient falls as Dh^0.6."),
+            "Not for large ceilings: the coefficient goes with Dh^(-0.6)."),
     ];
 
     private static Correlation Make(
@@ -76,7 +76,7 @@ internal static class AwbiHatton1999
             Reference = ReferenceTemperature.LocalAir,
             Length = CharacteristicLength.HydraulicDiameter,
             Range = new(new RangeLimit(RangeVariable.Grashof, new(9e8, highestGrashof), RangeOrigin.Recalled, CharacteristicLength.HydraulicDiameter)),
-            Evidence = new(EvidenceKind.ClimateChamber, "climate chamber 2.78 m x 2.30 m x 2.78 m and a small box; one surface heated, others cooled"),
+            Evidence = new(EvidenceKind.ClimateChamber, "climate chamber of about 2.78 m x 2.30 m x 2.78 m (recalled, medium) and a small box; one surface heated, others cooled"),
             TextCheck = check,
             IsUnconfirmed = check >= TextCheck.RecalledMedium,
             Doubts = [.. doubts, "The reference, local air about 0.1 m from the surface, is recalled (medium)."],

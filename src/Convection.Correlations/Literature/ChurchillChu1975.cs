@@ -10,15 +10,16 @@ namespace Convection.Correlations.Literature;
 /// International Journal of Heat and Mass Transfer 18(11), 1323–1329, 1975, doi:10.1016/0017-9310(75)90243-4.
 /// </summary>
 /// <remarks>
-/// <para>Measured: pooled data of isolated vertical plates in many fluids.</para>
+/// <para>Measured: pooled data of isolated isothermal vertical plates in still, unbounded fluid.</para>
 /// <para>
 /// Symbols: Nu = h·H/k, Ra = g·β·|ΔT|·H³·Pr/ν² with the height H; f = [1 + (0.492/Pr)^(9/16)]. All ranges:
 /// Nu = {0.825 + 0.387·Ra^(1/6)/f^(8/27)}². Laminar: Nu = 0.68 + 0.670·Ra^(1/4)/f^(4/9).
 /// </para>
 /// <para>Range: Ra up to 1e12; laminar form 0.1–1e9. Reference: undisturbed air. Properties at film temperature.</para>
 /// <para>
-/// Check: quoted in an encyclopaedia article, and used in a worked solution (Çengel, Heat and Mass Transfer, problem 9-19E).
-/// One set of course notes prints 0.663 and Ra up to 1e8 for the laminar form; 0.670 gives the similarity value 0.514 for air.
+/// Check: both quoted in an encyclopaedia article; the full-range form also used in a worked solution (Çengel, Heat and Mass
+/// Transfer, problem 9-19E). One set of course notes prints 0.663 and Ra up to 1e8 for the laminar form; 0.670 gives 0.514 for
+/// air, the similarity value being 0.515.
 /// </para>
 /// </remarks>
 internal static class ChurchillChu1975
@@ -77,8 +78,8 @@ internal static class ChurchillChu1975
         Reference = ReferenceTemperature.FreeStream,
         Length = CharacteristicLength.Height,
         Range = new(new RangeLimit(RangeVariable.Rayleigh, rayleigh, origin, CharacteristicLength.Height)),
-        Evidence = new(EvidenceKind.Plate, "pooled data of isolated vertical plates in many fluids"),
+        Evidence = new(EvidenceKind.Plate, "pooled data of isolated isothermal vertical plates in still, unbounded fluid"),
         TextCheck = TextCheck.Quoted,
-        Doubts = doubts,
+        Doubts = [.. doubts, "An isolated plate knows no stratification, no neighbouring plumes and no circulation of a room."],
     };
 }

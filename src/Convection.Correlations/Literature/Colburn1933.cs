@@ -5,9 +5,8 @@ using Convection.Correlations.Registry;
 namespace Convection.Correlations.Literature;
 
 /// <summary>
-/// A.P. Colburn, "A method of correlating forced convection heat transfer data and a comparison with fluid friction",
-/// Transactions of the American Institute of Chemical Engineers 29, 174–210, 1933 (recalled): the analogy; the forms are those
-/// of the textbooks.
+/// A.P. Colburn, "A method of correlating forced convection heat transfer data", Transactions of the American Institute of
+/// Chemical Engineers 29, 174–210, 1933 (recalled): the analogy; the forms are those of the textbooks.
 /// </summary>
 /// <remarks>
 /// <para>Basis: turbulent friction on a flat plate and the analogy of heat and momentum transfer; mean value over the plate.</para>
@@ -16,8 +15,8 @@ namespace Convection.Correlations.Literature;
 /// turbulent: Nu = (0.037·Re^0.8 − 871)·Pr^(1/3).
 /// </para>
 /// <para>
-/// Range: Re 5e5–1e7 and 5e5–1e8. Room surfaces swept by disturbed air have Re 1e4–1e5: there the turbulent form is used in
-/// engineering down to 1.5e4, where it crosses the laminar law. Reference: air outside the boundary layer. Properties at film
+/// Range: Re 5e5–1e7 and 5e5–1e8. Room-height walls at 0.05–0.5 m/s have Re 8e3–8e4: laminar by number, turbulent in practice. The
+/// turbulent form is used lower for such disturbed air; this library lets it reach down to 1.5e4, where it crosses the laminar law. Reference: air outside the boundary layer. Properties at film
 /// temperature.
 /// </para>
 /// <para>Check: turbulent form recalled (high); the mixed form meets the laminar law at Re 5e5 within 0.1 %.</para>
@@ -37,7 +36,7 @@ internal static class Colburn1933
         Key = "colburn-1933",
         Authors = "A.P. Colburn",
         Year = 1933,
-        Title = "A method of correlating forced convection heat transfer data and a comparison with fluid friction",
+        Title = "A method of correlating forced convection heat transfer data",
         Source = "Transactions of the American Institute of Chemical Engineers 29, 174-210",
         ShortName = "Colburn (1933), textbook form",
     };
@@ -63,12 +62,12 @@ internal static class Colburn1933
             Range = new(new RangeLimit(RangeVariable.Reynolds, new(5e5, 1e7), RangeOrigin.Recalled, CharacteristicLength.AlongFlow)
             {
                 Extended = new Interval(1.5e4, 1e7),
-                Note = "Used below its range for surfaces swept by disturbed air (engineering use).",
+                Note = "Used below its range for surfaces swept by disturbed air, down to where it crosses the laminar law (a choice of this library).",
             }),
             Evidence = new(EvidenceKind.Plate, "friction of flat plates and the analogy of heat and momentum transfer"),
             TextCheck = TextCheck.RecalledHigh,
             IsUnconfirmed = true,
-            Doubts = ["Below Re 5e5 its use for surfaces swept by disturbed air is an engineering habit; at 0.5 m/s it is 1.6 times the laminar law."],
+            Doubts = ["Below Re 5e5 its use for surfaces swept by disturbed air is an engineering habit; along 2.5 m at 0.5 m/s it is 1.6 times the laminar law."],
         },
         new()
         {

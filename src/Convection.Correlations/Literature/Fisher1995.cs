@@ -17,7 +17,7 @@ namespace Convection.Correlations.Literature;
 /// Symbols: ACH air changes of supply air (recirculated air included) per hour [1/h], h = c0 + c1·ACH^0.8 in W/(m²·K). The size
 /// of the room is built in; the length of the dimensionless form is V^(1/3).
 /// </para>
-/// <para>Range: 3–12 ACH, never below 3: some intercepts turn the form negative. Reference: supply air.</para>
+/// <para>Range: 3–12 ACH (quoted for the test programme), never below 3: some intercepts turn the form negative. Reference: supply air.</para>
 /// <para>
 /// Check: recalled (high) for the ceiling diffuser. Its set keeps the energy balance of its test room: Σ h·A/(ρ·c_p·V̇) is
 /// 0.83, 0.81 and 0.75 at 3, 6 and 12 ACH; that supports the sum over the surfaces, not single digits. The side-jet rows are
@@ -75,10 +75,10 @@ internal static class Fisher1995
             Law = new FlowLaw(DrivingVariable.AirChangeRate, intercept, slope, Exponent),
             Reference = ReferenceTemperature.SupplyAir,
             Length = CharacteristicLength.RoomCubeRoot,
-            Range = new(new RangeLimit(RangeVariable.AirChangeRate, Tested, RangeOrigin.Recalled)),
+            Range = new(new RangeLimit(RangeVariable.AirChangeRate, Tested, RangeOrigin.Source)),
             Evidence = new(EvidenceKind.FullScaleRoom, "full-scale room of 34.4 m3, all six surfaces heated panels, isothermal, 3 to 12 air changes per hour"),
             TextCheck = check,
             IsUnconfirmed = check >= TextCheck.RecalledMedium,
-            Doubts = [doubt, "Measured in an isothermal room of 34.4 m3, whose size is built in."],
+            Doubts = [doubt, "Measured in an isothermal room of 34.4 m3 (recalled, medium), whose size is built in."],
         };
 }

@@ -47,6 +47,6 @@ internal static class Iso6946
         Range = ValidityRange.NotKnown,
         Evidence = new(EvidenceKind.Standard, "a convention for heat loss through building elements"),
         TextCheck = check,
-        Doubts = [.. doubts, "A fixed value knows neither temperature difference nor plant."],
+        Doubts = [.. doubts, "A fixed value knows neither temperature difference nor plant; the edition is recalled."],
     };
 }

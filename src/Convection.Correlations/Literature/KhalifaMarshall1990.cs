@@ -16,7 +16,7 @@ namespace Convection.Correlations.Literature;
 /// </para>
 /// <para>
 /// Symbols: |ΔT| surface against cell air [K], h = C·|ΔT|ⁿ in W/(m²·K). No length: the size of the cell is built in, so do not
-/// carry the forms to tall or large rooms.
+/// carry the forms to tall or large rooms. The wall forms stand 1.3–1.75 times above those of Alamdari and Hammond.
 /// </para>
 /// <para>Range: not known; 0.5–5 K is assumed for warnings. Reference: air of the cell, position not known.</para>
 /// <para>
@@ -27,13 +27,17 @@ namespace Convection.Correlations.Literature;
 internal static class KhalifaMarshall1990
 {
     private const string AssignmentDoubt =
-        "Which arrangement the pairs 2.30/3.10, 2.07/2.72 and 7.61 belong to is recalled in two ways; the alternatives differ by about "
-        + "12 to 20 % (walls 10-13 %, ceilings 11-22 %, windows 2-15 % over 0.5-5 K).";
+        "Which arrangement some pairs belong to is recalled in two ways: 2.30/3.10 to a radiator room or one with a heated panel, 2.07/2.72 "
+        + "to a fan-heater room or perhaps a radiator room too, 7.61 to a fan-heater room or a radiator elsewhere. The alternatives differ "
+        + "by about 12 to 20 % (walls 10-13 %, ceilings 11-22 %, windows 2-15 % over 0.5-5 K).";
 
     private const string RangeDoubt = "Temperature-difference range not known; 0.5 to 5 K is assumed for warnings.";
-    private const string SizeDoubt = "The size of the test cell (2.95 m x 2.35 m x 2.08 m) is built in.";
-    private const string WindowDoubt = "Never for a window in a room without a heat emitter: the value is 3 to 5 times a boundary-layer value.";
-    private const string FanDoubt = "Fan and buoyancy are contained together; the state of the fan is no variable.";
+    private const string SizeDoubt = "The size of the test cell (about 2.95 m x 2.35 m x 2.08 m high; recalled, medium) is built in: not for tall or large rooms.";
+    private const string WindowDoubt = "Never for a window in a room without a heat emitter: at 2 to 10 K the value is 3 to 5 times a boundary-layer value.";
+    private const string FanDoubt = "Fan and buoyancy are contained together; one heater in one cell of 14 m3, the state of the fan is no variable.";
+    private const string BasisDoubt =
+        "No independent calculation can confirm these forms, and where the air temperature was measured is not known: the weakest-founded room data here.";
+
     private const string SenseDoubt = "Heat flow at the ceiling is taken as upwards; this is inferred.";
 
     public static Publication Publication { get; } = new()
@@ -93,10 +97,10 @@ internal static class KhalifaMarshall1990
             Law = new PowerLaw(coefficient, exponent),
             Reference = ReferenceTemperature.RoomAir,
             Range = new(new RangeLimit(RangeVariable.TemperatureDifference, new(0.5, 5), RangeOrigin.Assumed)),
-            Evidence = new(EvidenceKind.FullScaleRoom, "guarded full-scale test cell, 2.95 m x 2.35 m x 2.08 m high, nine heating arrangements"),
+            Evidence = new(EvidenceKind.FullScaleRoom, "guarded full-scale test cell of about 14 m3, nine heating arrangements"),
             TextCheck = check,
             IsUnconfirmed = true,
             ContainsBuoyancy = true,
-            Doubts = [AssignmentDoubt, .. doubts, RangeDoubt, SizeDoubt],
+            Doubts = [AssignmentDoubt, .. doubts, RangeDoubt, SizeDoubt, BasisDoubt],
         };
 }

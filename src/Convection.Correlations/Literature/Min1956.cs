@@ -17,7 +17,7 @@ namespace Convection.Correlations.Literature;
 /// Symbols: |ΔT| surface against room air [K], Dh = 4A/P of the panel or surface [m], H height of the wall [m], h in W/(m²·K).
 /// Given here in SI; the originals are in inch-pound units (0.39, 0.29 and 0.041 with Btu/(h·ft²·°F), °F and ft).
 /// </para>
-/// <para>Range: not known; panels of room size. Reference: air 1.5 m above the floor, centre of the room (recalled, medium).</para>
+/// <para>Range: not known; panels of room size, differences of the order of 1–30 K (recalled, low). Reference: air 1.5 m above the floor, centre of the room (recalled, medium).</para>
 /// <para>Check: the inch-pound constants, recalled apart, convert to 2.416, 1.873 and 0.2004.</para>
 /// </remarks>
 internal static class Min1956
@@ -73,7 +73,7 @@ internal static class Min1956
             TextCheck = TextCheck.Reconstructed,
             Doubts =
             [
-                "Temperature-difference range not known; panels of room size.",
+                "Temperature-difference range not known; panels of room size, of the order of 1 to 30 K (recalled, low).",
                 "The reference, room air 1.5 m above the floor at the centre, is recalled (medium).",
             ],
         };

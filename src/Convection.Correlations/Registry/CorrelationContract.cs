@@ -39,11 +39,29 @@ internal static class CorrelationContract
                 break;
         }
 
+        Demand(
+            c.Law is not FlowLaw { Intercept: not 0 } || HasLowestFlow(c.Range!),
+            c,
+            "a flow law with an intercept needs a lowest tested flow, from which its flux can fade to zero.");
         Demand(c.Reference != ReferenceTemperature.Unspecified, c, "its reference temperature is not given.");
         Demand(
             c.Reference != ReferenceTemperature.Operative || c.Family is CorrelationFamily.Total or CorrelationFamily.FixedValue,
             c,
             "only coefficients that contain radiation, or follow from such by subtraction, refer to operative temperature.");
+    }
+
+    private static bool HasLowestFlow(ValidityRange range)
+    {
+        foreach (RangeLimit limit in range.Limits)
+        {
+            if (limit.Variable is RangeVariable.AirChangeRate or RangeVariable.JetMomentum or RangeVariable.FlowPerLength or RangeVariable.Reynolds
+                && limit.Tested.Lowest > 0)
+            {
+                return true;
+            }
+        }
+
+        return false;
     }
 
     private static bool ByAir(Correlation c) => c.Reference is not (ReferenceTemperature.Operative or ReferenceTemperature.Unspecified);

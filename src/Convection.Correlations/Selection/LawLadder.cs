@@ -6,17 +6,22 @@ namespace Convection.Correlations.Selection;
 
 /// <summary>Laws that follow each other as the driving variable rises, and the bands over which each passes into the next.</summary>
 /// <remarks>
-/// A better-ranked law keeps its whole interval; a lesser one serves outside. Where the two overlap, the passage lies in the
+/// The best-ranked law keeps its interval; lesser ones serve below and above it. Where two overlap, the passage lies in the
 /// overlap next to the better law's limit and is at most a factor of 1.2 wide; across a gap it fills the gap; where they merely
-/// touch it reaches 5 % to either side.
+/// touch it reaches 5 % to either side. A law is left out where its passages would run into each other.
 /// </remarks>
 internal sealed class LawLadder
 {
     private const double WidestOverlap = 1.2, TouchHalfWidth = 0.05;
 
     private readonly Rung[] rungs;
+    private readonly (double Low, double High)[] passages;
 
-    private LawLadder(Rung[] rungs) => this.rungs = rungs;
+    private LawLadder(Rung[] rungs, (double Low, double High)[] passages)
+    {
+        this.rungs = rungs;
+        this.passages = passages;
+    }
 
     public IReadOnlyList<SelectedLaw> Laws => Array.ConvertAll(rungs, r => r.Law);
 
@@ -24,61 +29,47 @@ internal sealed class LawLadder
 
     public SelectedLaw this[int index] => rungs[index].Law;
 
-    /// <summary>Lower end of the lowest law's interval.</summary>
-    public double Lowest => rungs[0].Low;
-
     /// <summary>Upper end of the highest law's interval.</summary>
     public double Highest => rungs[rungs.Length - 1].High;
 
-    public static LawLadder Of(SelectedLaw law) => new([new Rung(law, 0, law.Range.UsableLow, law.Range.UsableHigh)]);
-
-    /// <summary>Takes laws in the order of their rank; a law that covers nothing new is left out.</summary>
+    /// <summary>Takes laws in the order of their rank, the best one first.</summary>
     public static LawLadder Build(IReadOnlyList<SelectedLaw> ranked)
     {
         var rungs = new List<Rung>();
         for (int rank = 0; rank < ranked.Count; rank++)
         {
-            var rung = new Rung(ranked[rank], rank, ranked[rank].Range.UsableLow, ranked[rank].Range.UsableHigh);
+            SelectedLaw law = ranked[rank];
+            var rung = new Rung(law, rank, law.Range.UsableLow, law.Range.UsableHigh);
             if (rungs.Count == 0)
             {
                 rungs.Add(rung);
+                continue;
             }
-            else if (rung.Low < rungs[0].Low && rung.High <= rungs[rungs.Count - 1].High)
+
+            if (rung.Low < rungs[0].Low)
             {
-                rungs.Insert(0, rung);
+                Try(rungs, [rung with { High = Math.Min(rung.High, rungs[0].High) }, .. rungs]);
             }
-            else if (rung.High > rungs[rungs.Count - 1].High && rung.Low >= rungs[0].Low)
+
+            Rung last = rungs[rungs.Count - 1];
+            if (rung.High > last.High)
             {
-                rungs.Add(rung);
+                Try(rungs, [.. rungs, rung with { Low = Math.Max(rung.Low, last.Low) }]);
             }
         }
 
-        return new LawLadder([.. rungs]);
+        return new LawLadder([.. rungs], Passages(rungs)!);
     }
 
     /// <summary>Band over which law i passes into law i + 1.</summary>
-    public (double Low, double High) Passage(int i)
-    {
-        Rung lower = rungs[i], upper = rungs[i + 1];
-        double overlapLow = upper.Low, overlapHigh = lower.High;
-        if (overlapHigh > overlapLow)
-        {
-            return lower.Rank < upper.Rank
-                ? (Math.Max(overlapLow, overlapHigh / WidestOverlap), overlapHigh)
-                : (overlapLow, Math.Min(overlapHigh, overlapLow * WidestOverlap));
-        }
-
-        return overlapLow > overlapHigh * (1 + (2 * TouchHalfWidth))
-            ? (overlapHigh, overlapLow)
-            : (overlapHigh * (1 - TouchHalfWidth), overlapLow * (1 + TouchHalfWidth));
-    }
+    public (double Low, double High) Passage(int i) => passages[i];
 
     /// <summary>The law at x, and which of the ladder's laws take part in it: the lower index, and the weight of the next one.</summary>
     public LawValue Evaluate(double x, out int lower, out double weightOfNext)
     {
-        for (lower = 0; lower < rungs.Length - 1; lower++)
+        for (lower = 0; lower < passages.Length; lower++)
         {
-            (double low, double high) = Passage(lower);
+            (double low, double high) = passages[lower];
             if (x < high)
             {
                 weightOfNext = Crossfade.Weight(x, low, high);
@@ -92,6 +83,40 @@ internal sealed class LawLadder
         weightOfNext = 0;
         return rungs[lower].Law.Law.Evaluate(x);
     }
+
+    private static void Try(List<Rung> rungs, List<Rung> longer)
+    {
+        if (Passages(longer) is not null)
+        {
+            rungs.Clear();
+            rungs.AddRange(longer);
+        }
+    }
+
+    /// <summary>The passages between neighbours, or null where two of them would overlap.</summary>
+    private static (double Low, double High)[]? Passages(List<Rung> rungs)
+    {
+        var passages = new (double Low, double High)[rungs.Count - 1];
+        for (int i = 0; i < passages.Length; i++)
+        {
+            passages[i] = Between(rungs[i], rungs[i + 1]);
+            if (i > 0 && passages[i].Low < passages[i - 1].High)
+            {
+                return null;
+            }
+        }
+
+        return passages;
+    }
+
+    private static (double Low, double High) Between(Rung lower, Rung upper)
+        => lower.High > upper.Low
+            ? lower.Rank < upper.Rank
+                ? (Math.Max(upper.Low, lower.High / WidestOverlap), lower.High)
+                : (upper.Low, Math.Min(lower.High, upper.Low * WidestOverlap))
+            : upper.Low > lower.High * (1 + (2 * TouchHalfWidth))
+                ? (lower.High, upper.Low)
+                : (lower.High * (1 - TouchHalfWidth), upper.Low * (1 + TouchHalfWidth));
 
     private sealed record Rung(SelectedLaw Law, int Rank, double Low, double High);
 }

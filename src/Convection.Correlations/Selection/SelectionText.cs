@@ -57,7 +57,7 @@ internal static class SelectionText
         text.Append(surface.Surface).Append('\n');
         foreach (SelectedPart part in surface.Parts)
         {
-            text.Append("  ").Append(Heading(part, surface.Surface, policy)).Append('\n');
+            TextWrap.Line(text, "  ", Heading(part, surface.Surface, policy));
             for (int i = 0; i < part.Ladder.Count; i++)
             {
                 WriteLaw(text, part.Ladder, i);
@@ -123,7 +123,7 @@ internal static class SelectionText
         {
             (double low, double high) = ladder.Passage(i);
             text.Append("      passes into the next over ").Append(FormulaText.Symbol(law.Law.DrivenBy)).Append(' ')
-                .Append(InvariantText.Span(low, high, FormulaText.Unit(law.Law.DrivenBy))).Append('\n');
+                .Append(InvariantText.Span(low, high, FormulaText.Unit(law.Law.DrivenBy), InvariantText.Rounded)).Append('\n');
         }
     }
 

@@ -63,7 +63,7 @@ internal sealed class SurfaceSelector
 
         if (SurfaceForm.IsInclined(surface) && !parts.Exists(p => p.Kind == PartKind.StillAir && (p.Ladder[0].Correlation.Applies.Surfaces & SurfaceSet.Inclined) != 0))
         {
-            AddGap(PartKind.StillAir, SurfaceSide.Either, null, "No correlation here for a surface tilted " + InvariantText.Number(surface.TiltDegrees, "°")
+            AddGap(PartKind.StillAir, SurfaceSide.Either, null, "No correlation of this registry covers a surface tilted " + InvariantText.Number(surface.TiltDegrees, "°")
                 + "; the form of a " + SurfaceForm.NearestWord(surface) + " is used.");
         }
 
@@ -102,14 +102,14 @@ internal sealed class SurfaceSelector
             SelectedPart? part = Choose(PartKind.StillAir, side, null, pinned, c => IsStillAir(c) ? StillAirDriver(c, side) : null);
             if (part is null)
             {
-                AddGap(PartKind.StillAir, side, null, "No correlation in this registry for a " + SurfaceForm.Word(surface, side) + " in still air; no flux can be given there.");
+                AddGap(PartKind.StillAir, side, null, "No correlation of this registry covers a " + SurfaceForm.Word(surface, side) + " in still air; no flux can be given there.");
                 continue;
             }
 
             Correlation chosen = part.Ladder[0].Correlation;
             if (IsActive(side) && pinned is null && chosen.Applies.Driver == FlowDriver.StillAir)
             {
-                AddGap(PartKind.StillAir, side, null, "No published correlation for a " + SurfaceForm.Word(surface, side) + "; the one for still air is used.");
+                AddGap(PartKind.StillAir, side, null, "No correlation of this registry covers a " + SurfaceForm.Word(surface, side) + "; the one for still air is used.");
             }
 
             found.Add(part);
@@ -158,7 +158,7 @@ internal sealed class SurfaceSelector
         if (missing.Count > 0)
         {
             SurfaceSide side = missing.Count == 2 ? SurfaceSide.Either : missing[0];
-            AddGap(kind, side, device, "No published correlation for a " + SurfaceForm.Word(surface, side) + " in a room with "
+            AddGap(kind, side, device, "No correlation of this registry covers a " + SurfaceForm.Word(surface, side) + " in a room with "
                 + Article(device.Description) + " ('" + device.Name + "'); the still-air one stays in force.");
         }
 

@@ -198,7 +198,7 @@ public class RoomPropertyTests
 
                 RoomResult result = bound.Evaluate(typed);
                 Assert.Equal(plain, result.Surfaces);
-                Assert.Equal(plain[0].FluxWattsPerSquareMetre, result[bound.Room.Surfaces[0].Name].HeatFlux.WattsPerSquareMeter);
+                Assert.Equal(plain[0].FluxWattsPerSquareMetre, result[bound.Room.Surfaces[0].Name].HeatFlux!.Value.WattsPerSquareMeter);
             },
             iter: 100);
     }
