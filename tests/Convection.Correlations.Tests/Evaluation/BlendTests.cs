@@ -51,7 +51,7 @@ public class BlendTests
     }
 
     [Theory]
-    [InlineData(1.5)]
+    [InlineData(2.5)]
     [InlineData(3)]
     [InlineData(3.5)]
     public void EveryRule_AnyTwoFluxes_IsSymmetricBoundedAndDifferentiated(double exponent)
