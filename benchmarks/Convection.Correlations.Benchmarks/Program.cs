@@ -1,0 +1,4 @@
+using BenchmarkDotNet.Running;
+using Convection.Correlations.Benchmarks;
+
+BenchmarkSwitcher.FromAssembly(typeof(RoomBenchmarks).Assembly).Run(args);
