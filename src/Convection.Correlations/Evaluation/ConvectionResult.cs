@@ -14,7 +14,7 @@ public readonly struct ConvectionResult : IEquatable<ConvectionResult>
 {
     private readonly Flux total, buoyant, forced;
     private readonly double roomDifference, buoyantCoefficient, forcedCoefficient;
-    private readonly ReferenceTemperature forcedReference, buoyantReference;
+    private readonly ReferenceTemperature forcedReference;
     private readonly CorrelationId[]? ids;
     private readonly ulong used;
 
@@ -26,7 +26,6 @@ public readonly struct ConvectionResult : IEquatable<ConvectionResult>
         Flux forced,
         double roomDifference,
         double buoyantCoefficient,
-        ReferenceTemperature buoyantReference,
         double forcedCoefficient,
         ReferenceTemperature forcedReference,
         FlowRegime regime,
@@ -40,7 +39,6 @@ public readonly struct ConvectionResult : IEquatable<ConvectionResult>
         this.forced = forced;
         this.roomDifference = roomDifference;
         this.buoyantCoefficient = buoyantCoefficient;
-        this.buoyantReference = buoyantReference;
         this.forcedCoefficient = forcedCoefficient;
         this.forcedReference = forcedReference;
         Regime = regime;
@@ -77,7 +75,7 @@ public readonly struct ConvectionResult : IEquatable<ConvectionResult>
     public double CoefficientWattsPerSquareMetreKelvin => !IsValid ? double.NaN : ForcedLeads ? forcedCoefficient : buoyantCoefficient;
 
     /// <summary>Temperature that <see cref="CoefficientWattsPerSquareMetreKelvin"/> is taken against.</summary>
-    public ReferenceTemperature Reference => !IsValid ? ReferenceTemperature.Unspecified : ForcedLeads ? forcedReference : buoyantReference;
+    public ReferenceTemperature Reference => !IsValid ? ReferenceTemperature.Unspecified : ForcedLeads ? forcedReference : ReferenceTemperature.RoomAir;
 
     /// <summary>
     /// q/(T_surface − T_room) [W/(m²·K)]: what a model that knows room air only would have to use. NaN where the surface is as

@@ -93,7 +93,7 @@ public sealed class SurfaceConvection
 
         double difference = surfaceCelsius - roomCelsius;
         bool isWarmer = difference >= 0;
-        var sum = new Running(difference);
+        var sum = new FluxSum(difference);
         status = AddBuoyant(ref sum, isWarmer, devices);
         if (status == ConvectionStatus.Valid)
         {
@@ -134,10 +134,10 @@ public sealed class SurfaceConvection
         return Worse(status, needsTemperature && double.IsNaN(state.AirCelsius) ? ConvectionStatus.SupplyTemperatureMissing : ConvectionStatus.Valid);
     }
 
-    private static bool IsRunning(DeviceState state) => state.FlowCubicMetresPerSecond > 0 || state.SpeedMetresPerSecond > 0 || state.OutputFraction > 0;
+    private static bool IsFluxSum(DeviceState state) => state.FlowCubicMetresPerSecond > 0 || state.SpeedMetresPerSecond > 0 || state.OutputFraction > 0;
 
     /// <summary>Still air, giving way to heaters as their output rises.</summary>
-    private ConvectionStatus AddBuoyant(ref Running sum, bool isWarmer, DeviceStates devices)
+    private ConvectionStatus AddBuoyant(ref FluxSum sum, bool isWarmer, DeviceStates devices)
     {
         double rest = 1, weights = 0;
         double heated = 0, heatedSensitivity = 0;
@@ -184,7 +184,7 @@ public sealed class SurfaceConvection
         return ConvectionStatus.Valid;
     }
 
-    private ConvectionStatus AddForced(ref Running sum, double surfaceCelsius, double roomCelsius, DeviceStates devices)
+    private ConvectionStatus AddForced(ref FluxSum sum, double surfaceCelsius, double roomCelsius, DeviceStates devices)
     {
         foreach (ForcedPlan forced in plan.Forced)
         {
@@ -203,7 +203,7 @@ public sealed class SurfaceConvection
 
     /// <summary>One device's law for one side, where the surface is on that side of the law's own reference.</summary>
     private bool AddForced(
-        ref Running sum, StreamDirection stream, LawUse? use, bool isWarmer, double driving, DeviceState state, double surfaceCelsius, double roomCelsius)
+        ref FluxSum sum, StreamDirection stream, LawUse? use, bool isWarmer, double driving, DeviceState state, double surfaceCelsius, double roomCelsius)
     {
         if (use is null)
         {
@@ -242,16 +242,16 @@ public sealed class SurfaceConvection
             : reference == ReferenceTemperature.FreeStream && !double.IsNaN(state.AirCelsius) ? reference
             : ReferenceTemperature.RoomAir;
 
-    private ConvectionResult Finish(Running sum, bool isWarmer, DeviceStates devices)
+    private ConvectionResult Finish(FluxSum sum, bool isWarmer, DeviceStates devices)
     {
         Flux assisting = sum.Assisting(blend), opposing = sum.Opposing(blend), transverse = sum.Transverse(blend);
         Flux total = FluxBlend.Assisting(sum.Buoyant, assisting, blend.AssistingExponent, blend.OpposingExponent);
         total = FluxBlend.Opposing(total, opposing, blend.OpposingExponent, blend.OpposingFloor);
         total = FluxBlend.Assisting(total, transverse, blend.TransverseExponent, blend.OpposingExponent);
-        Flux forced = Pool(Pool(assisting, opposing, blend), transverse, blend);
+        Flux forced = FluxSum.Pool(FluxSum.Pool(assisting, opposing, blend), transverse, blend);
         foreach (GapPlan gap in plan.Gaps)
         {
-            sum.Flags |= gap.IsOn(isWarmer) && (gap.Device < 0 || IsRunning(devices[gap.Device])) ? ConvectionFlags.GapInEvidence : ConvectionFlags.None;
+            sum.Flags |= gap.IsOn(isWarmer) && (gap.Device < 0 || IsFluxSum(devices[gap.Device])) ? ConvectionFlags.GapInEvidence : ConvectionFlags.None;
         }
 
         bool opposite = sum.Buoyant.Value * forced.Value < 0;
@@ -262,7 +262,6 @@ public sealed class SurfaceConvection
             forced,
             sum.Difference,
             sum.BuoyantCoefficient,
-            ReferenceTemperature.RoomAir,
             sum.ForcedCoefficient,
             sum.ForcedReference,
             Regime(sum, forced.Value, assisting.Value, opposing.Value, transverse.Value),
@@ -271,11 +270,7 @@ public sealed class SurfaceConvection
             sum.Used);
     }
 
-    /// <summary>Forced fluxes of several devices or directions together.</summary>
-    private static Flux Pool(Flux one, Flux other, BlendRule blend)
-        => FluxBlend.Assisting(one, other, blend.TransverseExponent, blend.OpposingExponent);
-
-    private static FlowRegime Regime(Running sum, double forced, double assisting, double opposing, double transverse)
+    private static FlowRegime Regime(FluxSum sum, double forced, double assisting, double opposing, double transverse)
     {
         double size = Math.Abs(sum.Buoyant.Value) + Math.Abs(forced);
         double share = size == 0 ? 0 : Math.Abs(forced) / size;
@@ -287,77 +282,5 @@ public sealed class SurfaceConvection
             : leader == Math.Abs(transverse) ? FlowRegime.MixedTransverse
             : leader == Math.Abs(opposing) ? FlowRegime.MixedOpposing
             : FlowRegime.MixedAssisting;
-    }
-
-    /// <summary>What has been gathered while one surface is evaluated.</summary>
-    private struct Running(double difference)
-    {
-        public double Difference = difference;
-        public Flux Buoyant;
-        public double BuoyantCoefficient;
-        public double MixedWeight;
-        public double ForcedCoefficient;
-        public ReferenceTemperature ForcedReference;
-        public ConvectionFlags Flags;
-        public ulong Used;
-        private double strongest = -1;
-        private Flux up, upCold, down, downCold, across, acrossCold;
-
-        public readonly bool HasOppositeDevices
-            => (up.Value != 0 || down.Value != 0 || across.Value != 0) && (upCold.Value != 0 || downCold.Value != 0 || acrossCold.Value != 0);
-
-        private readonly bool BuoyancyRises => Difference >= 0;
-
-        public bool Use(LawUse use, double x, out LawValue law)
-        {
-            bool accepted = use.TryEvaluate(x, out law, out ConvectionFlags flags, out ulong used);
-            Flags |= flags;
-            Used |= used;
-            return accepted;
-        }
-
-        /// <summary>Devices whose stream runs the same way and whose heat flows the same way add up as in transverse flow.</summary>
-        public void AddForced(Flux flux, double coefficient, ReferenceTemperature reference, StreamDirection stream, BlendRule blend)
-        {
-            bool cold = flux.Value < 0;
-            switch (stream)
-            {
-                case StreamDirection.Up:
-                    Add(ref cold ? ref upCold : ref up, flux, blend);
-                    break;
-                case StreamDirection.Down:
-                    Add(ref cold ? ref downCold : ref down, flux, blend);
-                    break;
-                default:
-                    Add(ref cold ? ref acrossCold : ref across, flux, blend);
-                    break;
-            }
-
-            if (Math.Abs(flux.Value) > strongest)
-            {
-                strongest = Math.Abs(flux.Value);
-                ForcedCoefficient = coefficient;
-                ForcedReference = reference;
-            }
-        }
-
-        /// <summary>Buoyancy gives way to a forced law that contains it.</summary>
-        public void GiveWay(double weight)
-        {
-            Buoyant = Buoyant.Times(1 - weight);
-            BuoyantCoefficient *= 1 - weight;
-            MixedWeight = Math.Max(MixedWeight, weight);
-        }
-
-        public readonly Flux Assisting(BlendRule blend) => BuoyancyRises ? Both(up, upCold, blend) : Both(down, downCold, blend);
-
-        public readonly Flux Opposing(BlendRule blend) => BuoyancyRises ? Both(down, downCold, blend) : Both(up, upCold, blend);
-
-        public readonly Flux Transverse(BlendRule blend) => Both(across, acrossCold, blend);
-
-        private static Flux Both(Flux warm, Flux cold, BlendRule blend) => Pool(warm, cold, blend);
-
-        private static void Add(ref Flux pool, Flux flux, BlendRule blend) => pool = Pool(pool, flux, blend);
-
     }
 }
