@@ -20,7 +20,7 @@ for (int i = 0; i < args.Length; i += 2)
     {
         bool asked = args[i] is "--help" or "-h";
         (asked ? Console.Out : Console.Error).WriteLine(
-            (asked ? string.Empty : "'" + args[i] + "' is not understood.\n")
+            (asked ? string.Empty : "'" + args[i] + (args[i] is "--input" or "--output" ? "' needs a value.\n" : "' is not understood.\n"))
             + "quickstart [--input FILE] [--output FOLDER]\n"
             + "  FILE    a day as CSV; the one that ships with the quickstart if left out. Its header:\n"
             + "          " + string.Join(",", DayFile.Columns(Office.Describe())) + "\n"
