@@ -48,10 +48,6 @@ internal sealed class SurfacePlan
         {
             int device = gap.Device is null ? -1 : Room.IndexOfDevice(gap.Device.Name);
             gaps.Add(new GapPlan(device, gap.Side));
-            if (device >= 0)
-            {
-                touched.Add(device);
-            }
         }
 
         Gaps = [.. gaps];
@@ -80,7 +76,7 @@ internal sealed class SurfacePlan
 
     public GapPlan[] Gaps { get; }
 
-    /// <summary>The devices that this surface feels.</summary>
+    /// <summary>The devices whose state this surface needs; one that no correlation covers is none of them.</summary>
     public int[] Devices { get; }
 
     /// <summary>The correlations that results may name, by bit.</summary>

@@ -294,6 +294,21 @@ public class RoomConvectionTests
             results.Select(r => r.Status));
     }
 
+    /// <summary>Where no correlation covers a device, its state is not needed; the result says that it runs without evidence.</summary>
+    [Fact]
+    public void DeviceWithoutCorrelation_ImpossibleState_SpoilsNothingAndIsFlagged()
+    {
+        SurfaceConvection wall = Alone(Wall, new DisplacementInlet("inlet"));
+        foreach (DeviceState state in new[] { DeviceState.Supply(0.1, double.NaN), DeviceState.Supply(double.NaN, 18), DeviceState.Supply(0.1, 18) })
+        {
+            ConvectionResult result = wall.Evaluate(25, 20, state);
+            Assert.Equal(5 * 2.21715, result.FluxWattsPerSquareMetre, 6e-5);
+            Assert.Equal(ConvectionFlags.GapInEvidence, result.Flags);
+        }
+
+        Assert.Equal(ConvectionFlags.None, wall.Evaluate(25, 20, DeviceState.Off).Flags);
+    }
+
     [Fact]
     public void RoomState_UnknownNames_AreRefusedWithTheRoomsOwn()
     {
