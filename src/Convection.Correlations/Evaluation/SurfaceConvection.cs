@@ -134,7 +134,8 @@ public sealed class SurfaceConvection
         return Worse(status, needsTemperature && double.IsNaN(state.AirCelsius) ? ConvectionStatus.SupplyTemperatureMissing : ConvectionStatus.Valid);
     }
 
-    private static bool IsFluxSum(DeviceState state) => state.FlowCubicMetresPerSecond > 0 || state.SpeedMetresPerSecond > 0 || state.OutputFraction > 0;
+    private static bool IsRunning(DeviceState state)
+        => !(state.FlowCubicMetresPerSecond <= 0 && state.SpeedMetresPerSecond <= 0 && state.OutputFraction <= 0);
 
     /// <summary>Still air, giving way to heaters as their output rises.</summary>
     private ConvectionStatus AddBuoyant(ref FluxSum sum, bool isWarmer, DeviceStates devices)
@@ -251,7 +252,7 @@ public sealed class SurfaceConvection
         Flux forced = FluxSum.Pool(FluxSum.Pool(assisting, opposing, blend), transverse, blend);
         foreach (GapPlan gap in plan.Gaps)
         {
-            sum.Flags |= gap.IsOn(isWarmer) && (gap.Device < 0 || IsFluxSum(devices[gap.Device])) ? ConvectionFlags.GapInEvidence : ConvectionFlags.None;
+            sum.Flags |= gap.IsOn(isWarmer) && (gap.Device < 0 || IsRunning(devices[gap.Device])) ? ConvectionFlags.GapInEvidence : ConvectionFlags.None;
         }
 
         bool opposite = sum.Buoyant.Value * forced.Value < 0;
