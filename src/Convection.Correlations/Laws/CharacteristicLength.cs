@@ -23,4 +23,7 @@ public enum CharacteristicLength
 
     /// <summary>Cube root of the room volume [m].</summary>
     RoomCubeRoot = 6,
+
+    /// <summary>Mean of the two sides [m].</summary>
+    MeanSide = 7,
 }

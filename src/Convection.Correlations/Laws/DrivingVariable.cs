@@ -23,4 +23,7 @@ public enum DrivingVariable
 
     /// <summary>Speed of the stream along the surface [m/s].</summary>
     Speed = 6,
+
+    /// <summary>Forced part over buoyant part h_f/h_n [-], of a rule that mixes two coefficients.</summary>
+    PartRatio = 7,
 }

@@ -15,6 +15,7 @@ internal static class FormulaText
         CharacteristicLength.AlongFlow => "L",
         CharacteristicLength.HalfShortSide => "R",
         CharacteristicLength.RoomCubeRoot => "V^(1/3)",
+        CharacteristicLength.MeanSide => "Lm",
         _ => string.Empty,
     };
 
@@ -25,6 +26,7 @@ internal static class FormulaText
         DrivingVariable.JetMomentum => "J",
         DrivingVariable.FlowPerLength => "(V̇/L)",
         DrivingVariable.Speed => "U",
+        DrivingVariable.PartRatio => "h_f/h_n",
         _ => string.Empty,
     };
 
@@ -35,6 +37,7 @@ internal static class FormulaText
         DrivingVariable.JetMomentum => "a supply flow through an opening of known area",
         DrivingVariable.FlowPerLength => "a supply flow per length of façade",
         DrivingVariable.Speed => "a speed",
+        DrivingVariable.PartRatio => "the ratio of two parts",
         _ => "nothing",
     };
 

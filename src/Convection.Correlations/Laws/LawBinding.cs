@@ -19,15 +19,17 @@ public sealed class LawBinding
     /// Air in which dimensional formulas were measured, taken at the same film temperature: each such formula is then scaled
     /// by its own property group. Null leaves dimensional formulas as printed.
     /// </param>
+    /// <param name="isWarmer">True (the default) where the surface is warmer than the air; only laws for tilted surfaces ask.</param>
     /// <exception cref="ArgumentNullException">The surface is null.</exception>
     /// <exception cref="ArgumentOutOfRangeException">The volume is outside its interval, or the air is no air.</exception>
-    public LawBinding(SurfaceContext surface, AirProperties air, double roomVolumeCubicMetres = 50, AirProperties? laboratoryAir = null)
+    public LawBinding(SurfaceContext surface, AirProperties air, double roomVolumeCubicMetres = 50, AirProperties? laboratoryAir = null, bool isWarmer = true)
     {
         Surface = Require.NotNull(surface, nameof(surface));
         Require.Positive(air.DensityKilogramsPerCubicMetre, 100, "Density of the air", "kg/m³", nameof(air));
         Air = air;
         RoomVolumeCubicMetres = Require.Positive(roomVolumeCubicMetres, 1e6, "Room volume", "m³", nameof(roomVolumeCubicMetres));
         LaboratoryAir = laboratoryAir;
+        IsWarmer = isWarmer;
     }
 
     /// <summary>The surface.</summary>
@@ -42,6 +44,15 @@ public sealed class LawBinding
     /// <summary>Air in which dimensional formulas were measured; null where they are taken as printed.</summary>
     public AirProperties? LaboratoryAir { get; }
 
+    /// <summary>True where the surface is warmer than the air.</summary>
+    public bool IsWarmer { get; }
+
+    /// <summary>
+    /// Tilt to the heat flow [°], 0 to 180: 0 where warm air rises freely (warm floor, cool ceiling), 90 upright, 180 where it is
+    /// held under or over the surface (warm ceiling, cool floor).
+    /// </summary>
+    public double FlowTiltDegrees => IsWarmer ? Surface.TiltDegrees : 180 - Surface.TiltDegrees;
+
     /// <summary>Value of a characteristic length [m].</summary>
     /// <param name="length">Which length.</param>
     /// <returns>The length [m]; 1 for <see cref="CharacteristicLength.None"/>, so that it drops out of products.</returns>
@@ -52,6 +63,7 @@ public sealed class LawBinding
         CharacteristicLength.AreaToPerimeter => Surface.AreaToPerimeterMetres,
         CharacteristicLength.AlongFlow => Surface.FlowLengthMetres,
         CharacteristicLength.HalfShortSide => 0.5 * Surface.ShortSideMetres,
+        CharacteristicLength.MeanSide => 0.5 * (Surface.WidthMetres + Surface.HeightMetres),
         CharacteristicLength.RoomCubeRoot => Math.Pow(RoomVolumeCubicMetres, 1.0 / 3),
         _ => 1,
     };

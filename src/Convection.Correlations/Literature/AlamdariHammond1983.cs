@@ -44,7 +44,7 @@ internal static class AlamdariHammond1983
         Make(
             "vertical",
             "upright surface in still air",
-            SurfaceSet.Wall | SurfaceSet.Window,
+            SurfaceSet.Wall,
             HeatFlowSense.Horizontal,
             CharacteristicLength.Height,
             new TwoAsymptoteLaw(

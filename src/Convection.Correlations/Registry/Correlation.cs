@@ -52,6 +52,12 @@ public sealed class Correlation
     /// <summary>True where buoyancy is contained in a forced or mixed coefficient and must not be added again.</summary>
     public bool ContainsBuoyancy { get; init; }
 
+    /// <summary>
+    /// True where it is kept for comparison and never chosen automatically: a local value, a rule that mixes two parts, a value
+    /// against a temperature that a room's state does not hold.
+    /// </summary>
+    public bool IsReferenceOnly { get; init; }
+
     /// <summary>Known doubts and remarks, one sentence each.</summary>
     /// <exception cref="ArgumentNullException">The list is null.</exception>
     public IReadOnlyList<string> Doubts { get => doubts; init => doubts = [.. Require.NotNull(value, nameof(Doubts))]; }

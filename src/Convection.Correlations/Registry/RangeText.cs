@@ -18,6 +18,8 @@ internal static class RangeText
         RangeVariable.JetMomentum => "J",
         RangeVariable.FlowPerLength => "flow per façade length",
         RangeVariable.Tilt => "tilt",
+        RangeVariable.FlowTilt => "tilt to the heat flow",
+        RangeVariable.TiltedRayleigh => "Ra·sin(tilt to the heat flow)",
         RangeVariable.Height => "height",
         RangeVariable.Archimedes => "Ar",
         _ => variable.ToString(),
@@ -28,14 +30,14 @@ internal static class RangeText
         RangeVariable.TemperatureDifference => "K",
         RangeVariable.AirChangeRate => "1/h",
         RangeVariable.FlowPerLength => "m³/(h·m)",
-        RangeVariable.Tilt => "°",
+        RangeVariable.Tilt or RangeVariable.FlowTilt => "°",
         RangeVariable.Height => "m",
         _ => string.Empty,
     };
 
     /// <summary>Dimensionless groups of flow are written with an exponent, all else plainly.</summary>
     public static Func<double, string> Writer(RangeVariable variable) => variable is RangeVariable.Rayleigh or RangeVariable.Grashof
-        or RangeVariable.ModifiedRayleigh or RangeVariable.Reynolds
+        or RangeVariable.ModifiedRayleigh or RangeVariable.TiltedRayleigh or RangeVariable.Reynolds
             ? InvariantText.Exponential
             : InvariantText.Number;
 
@@ -47,6 +49,7 @@ internal static class RangeText
         CharacteristicLength.AlongFlow => "L along the flow",
         CharacteristicLength.HalfShortSide => "half the short side",
         CharacteristicLength.RoomCubeRoot => "V^(1/3)",
+        CharacteristicLength.MeanSide => "the mean of the sides",
         _ => string.Empty,
     };
 }

@@ -41,4 +41,10 @@ public enum RangeVariable
 
     /// <summary>Archimedes number of the supply jet [-]; not checked, because the state does not hold it.</summary>
     Archimedes = 12,
+
+    /// <summary>Tilt to the heat flow [°]: 0 warm air rises freely, 90 upright, 180 it is held at the surface.</summary>
+    FlowTilt = 13,
+
+    /// <summary>Rayleigh number times the sine of the tilt to the heat flow [-].</summary>
+    TiltedRayleigh = 14,
 }

@@ -62,6 +62,8 @@ public sealed class ValidityRange
     {
         (RangeVariable.TemperatureDifference, _) when DrivenByDifference(drivenBy) => 1,
         (RangeVariable.Rayleigh, _) when DrivenByDifference(drivenBy) => binding.RayleighPerKelvin(limit.Length),
+        (RangeVariable.TiltedRayleigh, _) when DrivenByDifference(drivenBy)
+            => binding.RayleighPerKelvin(limit.Length) * Math.Max(Math.Sin(binding.FlowTiltDegrees * Math.PI / 180), 1e-9),
         (RangeVariable.Grashof, _) when DrivenByDifference(drivenBy) => binding.GrashofPerKelvin(limit.Length),
         (RangeVariable.Reynolds, DrivingVariable.Speed) => binding.ReynoldsPerSpeed(limit.Length),
         (RangeVariable.AirChangeRate, DrivingVariable.AirChangeRate) => 1,
@@ -74,6 +76,7 @@ public sealed class ValidityRange
     {
         RangeVariable.Prandtl => binding.Air.Prandtl,
         RangeVariable.Tilt => binding.Surface.TiltDegrees,
+        RangeVariable.FlowTilt => binding.FlowTiltDegrees,
         RangeVariable.Height => binding.Surface.HeightMetres,
         _ => null,
     };

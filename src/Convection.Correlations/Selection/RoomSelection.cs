@@ -57,8 +57,8 @@ public sealed class RoomSelection
         for (int i = 0; i < chosen.Length; i++)
         {
             SurfaceContext surface = room.Surfaces[i];
-            var binding = new LawBinding(surface, properties, room.VolumeCubicMetres, laboratory);
-            chosen[i] = new SurfaceSelector(room, surface, registry, policy, binding).Select();
+            LawBinding Bind(bool isWarmer) => new(surface, properties, room.VolumeCubicMetres, laboratory, isWarmer);
+            chosen[i] = new SurfaceSelector(room, surface, registry, policy, Bind(isWarmer: true), Bind(isWarmer: false)).Select();
         }
 
         return new RoomSelection(room, registry, policy, chosen);

@@ -26,7 +26,7 @@ internal static class SurfaceForm
         _ => HeatFlowSense.Horizontal,
     };
 
-    /// <summary>How well a correlation's surfaces cover this one: 0 exactly, 1 nearly, 2 as one of both horizontals, 3 as any; null not at all.</summary>
+    /// <summary>How well a correlation's surfaces cover this one: 0 exactly, 1 nearly, 3 as any; null not at all.</summary>
     public static int? Match(SurfaceSet covered, SurfaceContext surface)
     {
         SurfaceSet form = Of(surface);
@@ -36,7 +36,6 @@ internal static class SurfaceForm
             : inclined && (covered & SurfaceSet.Inclined) != 0 ? 0
             : !near ? null
             : inclined || (covered & form) == 0 ? 1
-            : covered == SurfaceSet.Horizontal ? 2
             : 0;
     }
 

@@ -20,19 +20,20 @@ internal sealed class SurfaceSelector
     private readonly CorrelationRegistry registry;
     private readonly ConvectionPolicy policy;
     private readonly SurfaceContext surface;
-    private readonly LawBinding binding;
+    private readonly LawBinding warmer, cooler;
     private readonly List<SelectedPart> parts = [];
     private readonly List<SelectionGap> gaps = [];
     private readonly List<Correlation> pins = [];
     private readonly HashSet<CorrelationId> usedPins = [];
 
-    public SurfaceSelector(RoomContext room, SurfaceContext surface, CorrelationRegistry registry, ConvectionPolicy policy, LawBinding binding)
+    public SurfaceSelector(RoomContext room, SurfaceContext surface, CorrelationRegistry registry, ConvectionPolicy policy, LawBinding warmer, LawBinding cooler)
     {
         this.room = room;
         this.surface = surface;
         this.registry = registry;
         this.policy = policy;
-        this.binding = binding;
+        this.warmer = warmer;
+        this.cooler = cooler;
         foreach (SurfacePin pin in policy.Pins)
         {
             if (string.Equals(pin.Surface, surface.Name, StringComparison.Ordinal))
@@ -223,7 +224,7 @@ internal sealed class SurfaceSelector
         foreach (Correlation c in registry.All)
         {
             int? driver = driverScore(c);
-            if (c == pinned || driver is null || !Fits(c, side, device, out int match))
+            if (c == pinned || c.IsReferenceOnly || driver is null || !Fits(c, side, device, out int match))
             {
                 continue;
             }
@@ -294,7 +295,7 @@ internal sealed class SurfaceSelector
         scores[Ranking.Evidence] = c.Family == CorrelationFamily.FixedValue ? (int)EvidenceKind.Standard + 1 : (int)c.Evidence.Kind;
         scores[Ranking.Text] = (int)c.TextCheck;
         scores[Ranking.KnownRange] = c.Range.IsKnown ? 0 : 1;
-        return new Candidate(c, binding, Nominal(side), scores) { IsPinned = isPinned };
+        return new Candidate(c, side == SurfaceSide.Warmer ? warmer : cooler, Nominal(side), scores) { IsPinned = isPinned };
     }
 
     private bool FitsSide(Correlation c, SurfaceSide side)
@@ -311,10 +312,15 @@ internal sealed class SurfaceSelector
             && (c.Applies.Condition is null || c.Applies.Condition(surface, device ?? NoDevice));
     }
 
+    /// <summary>
+    /// How exactly a still-air law's driver meets the surface. A heated or chilled surface is met by panels and by surfaces heated by
+    /// themselves in a room or chamber; still air comes second, an isolated plate third.
+    /// </summary>
     private int? StillAirDriver(Correlation c, SurfaceSide side)
         => c.Family == CorrelationFamily.FixedValue ? 3
-            : c.Applies.Driver == FlowDriver.StillAir ? (IsActive(side) ? 1 : 0)
-            : IsActive(side) ? 0
-            : c.Applies.Driver == FlowDriver.Panel ? null
-            : 1;
+            : c.Applies.Driver == FlowDriver.Panel ? (IsActive(side) ? 0 : null)
+            : !IsActive(side) ? (c.Applies.Driver == FlowDriver.StillAir ? 0 : 1)
+            : c.Applies.Driver == FlowDriver.StillAir ? 1
+            : c.Evidence.Kind <= EvidenceKind.ClimateChamber ? 0
+            : 2;
 }

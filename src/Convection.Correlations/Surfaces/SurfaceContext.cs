@@ -88,11 +88,11 @@ public sealed partial record SurfaceContext
         init => perimeter = Require.Positive(value, 1e4, "Perimeter of surface '" + Name + "'", "m", nameof(PerimeterMetres));
     }
 
-    /// <summary>Length along an air stream that sweeps the surface [m]; the height of a wall, the shorter side of a floor or ceiling unless given.</summary>
+    /// <summary>Length along an air stream that sweeps the surface [m]; the height of a wall or slope, the shorter side of a floor or ceiling unless given.</summary>
     /// <exception cref="ArgumentOutOfRangeException">The length is not positive, above 1000 m or not a number.</exception>
     public double FlowLengthMetres
     {
-        get => flowLength ?? (IsUpright ? HeightMetres : ShortSideMetres);
+        get => flowLength ?? (IsHorizontal ? ShortSideMetres : HeightMetres);
         init => flowLength = Length(value, "Length along the flow", nameof(FlowLengthMetres));
     }
 

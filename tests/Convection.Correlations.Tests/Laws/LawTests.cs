@@ -32,6 +32,12 @@ public class LawTests
         BoundLaw law = PublishedLiterature.Registry[id].Bind(Wall);
         foreach (double x in new[] { 0.01, 0.3, 1, 4, 11, 40 })
         {
+            // A rule of opposing parts has a kink where both are equal.
+            if (x == 1 && PublishedLiterature.Registry[id].Law is MixingLaw { IsOpposing: true })
+            {
+                continue;
+            }
+
             LawValue value = law.Evaluate(x);
             double step = 1e-6 * x;
             double slope = (law.Evaluate(x + step).Coefficient - law.Evaluate(x - step).Coefficient) / (2 * step);
@@ -154,7 +160,7 @@ public class LawTests
         SurfaceContext s = new("s", SurfaceKind.Floor, 5, 4);
         var binding = new LawBinding(s, Air, 64);
         Assert.Equal(
-            [1, 4, s.HydraulicDiameterMetres, s.AreaToPerimeterMetres, 4, 2, 4],
+            [1, 4, s.HydraulicDiameterMetres, s.AreaToPerimeterMetres, 4, 2, 4, 4.5],
             Array.ConvertAll(Enum.GetValues<CharacteristicLength>(), l => Math.Round(binding.Metres(l), 12)), new Near());
     }
 
