@@ -83,7 +83,7 @@ internal static class InvariantText
     public static string Span(double lowest, double highest, string unit, Func<double, string> write)
     {
         bool open = double.IsNegativeInfinity(lowest), endless = double.IsPositiveInfinity(highest);
-        string tail = unit.Length == 0 ? string.Empty : " " + unit;
+        string tail = unit.Length == 0 ? string.Empty : unit == "°" ? unit : " " + unit;
         return open && endless ? "any"
             : open ? "up to " + write(highest) + tail
             : endless ? "from " + write(lowest) + tail

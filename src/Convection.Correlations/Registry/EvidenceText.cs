@@ -48,6 +48,7 @@ internal static class EvidenceText
         SurfaceSet.Floor => "floors",
         SurfaceSet.Ceiling => "ceilings",
         SurfaceSet.Inclined => "inclined surfaces",
+        SurfaceSet.Window | SurfaceSet.Inclined => "windows at any tilt",
         _ => surfaces.ToString(),
     };
 

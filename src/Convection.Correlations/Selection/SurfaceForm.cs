@@ -19,12 +19,17 @@ internal static class SurfaceForm
     /// <summary>True where the surface is neither upright nor horizontal, so that its form is only the nearest one.</summary>
     public static bool IsInclined(SurfaceContext surface) => !surface.IsUpright && !surface.IsHorizontal;
 
-    public static HeatFlowSense Sense(SurfaceContext surface, SurfaceSide side) => Of(surface) switch
-    {
-        SurfaceSet.Floor => side == SurfaceSide.Warmer ? HeatFlowSense.Up : HeatFlowSense.Down,
-        SurfaceSet.Ceiling => side == SurfaceSide.Warmer ? HeatFlowSense.Down : HeatFlowSense.Up,
-        _ => HeatFlowSense.Horizontal,
-    };
+    /// <summary>Sideways at an upright surface; else up where warm air can rise from the surface, down where it is held.</summary>
+    public static HeatFlowSense Sense(SurfaceContext surface, SurfaceSide side)
+        => surface.IsUpright ? HeatFlowSense.Horizontal
+            : surface.TiltDegrees < 90 == (side == SurfaceSide.Warmer) ? HeatFlowSense.Up
+            : HeatFlowSense.Down;
+
+    /// <summary>True where a law for a sense of heat flow may serve: the surface's own, or sideways for a tilted surface that takes a wall's form.</summary>
+    public static bool Fits(HeatFlowSense sense, SurfaceContext surface, SurfaceSide side)
+        => sense == HeatFlowSense.Any
+            || sense == Sense(surface, side)
+            || (sense == HeatFlowSense.Horizontal && IsInclined(surface) && Of(surface) is SurfaceSet.Wall or SurfaceSet.Window);
 
     /// <summary>How well a correlation's surfaces cover this one: 0 exactly, 1 nearly, 3 as any; null not at all.</summary>
     public static int? Match(SurfaceSet covered, SurfaceContext surface)
@@ -33,11 +38,14 @@ internal static class SurfaceForm
         bool inclined = IsInclined(surface);
         bool near = (covered & form) != 0 || (form == SurfaceSet.Window && (covered & SurfaceSet.Wall) != 0);
         return covered == SurfaceSet.Any ? 3
-            : inclined && (covered & SurfaceSet.Inclined) != 0 ? 0
+            : (covered & SurfaceSet.Inclined) != 0 && (inclined || IsGlazing(covered, surface)) ? 0
             : !near ? null
             : inclined || (covered & form) == 0 ? 1
             : 0;
     }
+
+    private static bool IsGlazing(SurfaceSet covered, SurfaceContext surface)
+        => surface.Kind == SurfaceKind.Window && (covered & SurfaceSet.Window) != 0;
 
     public static string Word(SurfaceContext surface, SurfaceSide side)
     {

@@ -300,7 +300,7 @@ internal sealed class SurfaceSelector
 
     private bool FitsSide(Correlation c, SurfaceSide side)
         => (c.Applies.Side == SurfaceSide.Either || c.Applies.Side == side)
-            && (c.Applies.Sense == HeatFlowSense.Any || c.Applies.Sense == SurfaceForm.Sense(surface, side));
+            && SurfaceForm.Fits(c.Applies.Sense, surface, side);
 
     private bool Fits(Correlation c, SurfaceSide side, FlowDescriptor? device, out int match)
     {

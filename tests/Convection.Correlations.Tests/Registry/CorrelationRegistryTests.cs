@@ -156,7 +156,7 @@ public class CorrelationRegistryTests
                 (range.TestedHigh, RangeStanding.Within, RangeStanding.Above, 1e-9),
             })
             {
-                if (!double.IsInfinity(limit) && limit != 0)
+                if (!double.IsInfinity(limit) && limit != 0 && range.Violations.Count == 0)
                 {
                     judged++;
                     RangeStanding within = c.StandingAt(binding, limit * (1 - step)), without = c.StandingAt(binding, limit * (1 + step));
