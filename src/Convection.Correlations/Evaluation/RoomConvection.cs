@@ -1,6 +1,7 @@
 using System;
 using System.Collections.Generic;
 using System.Text;
+using Convection.Correlations.Jets;
 using Convection.Correlations.Registry;
 using Convection.Correlations.Rooms;
 using Convection.Correlations.Selection;
@@ -105,7 +106,17 @@ public sealed class RoomConvection
             }
         }
 
-        return new RoomResult(Room, results, [.. closures]);
+        var jets = new List<JetFinding>();
+        for (int device = 0; device < devices.Length; device++)
+        {
+            DeviceState s = devices[device];
+            if (JetFinding.Judge(Room.Devices[device], s.FlowCubicMetresPerSecond, s.AirCelsius - state.RoomCelsius, state.RoomCelsius) is { } jet)
+            {
+                jets.Add(jet);
+            }
+        }
+
+        return new RoomResult(Room, results, [.. closures], [.. jets]);
     }
 
     /// <summary>The energy closure of a device at a flow.</summary>

@@ -1,6 +1,7 @@
 using System;
 using System.Collections.Generic;
 using System.Text;
+using Convection.Correlations.Jets;
 using Convection.Correlations.Registry;
 using Convection.Correlations.Rooms;
 using UnitsNet;
@@ -12,12 +13,14 @@ public sealed class RoomResult
 {
     private readonly ConvectionResult[] surfaces;
     private readonly RoomClosure[] closures;
+    private readonly JetFinding[] jets;
 
-    internal RoomResult(RoomContext room, ConvectionResult[] surfaces, RoomClosure[] closures)
+    internal RoomResult(RoomContext room, ConvectionResult[] surfaces, RoomClosure[] closures, JetFinding[] jets)
     {
         Room = room;
         this.surfaces = surfaces;
         this.closures = closures;
+        this.jets = jets;
     }
 
     /// <summary>The room.</summary>
@@ -28,6 +31,9 @@ public sealed class RoomResult
 
     /// <summary>The energy closure of each running supply device whose forms refer to supply air.</summary>
     public IReadOnlyList<RoomClosure> Closures => closures;
+
+    /// <summary>What is known of the jets of running devices whose terminal data are given.</summary>
+    public IReadOnlyList<JetFinding> Jets => jets;
 
     /// <summary>Heat from all surfaces into the air [W], flux times area; NaN where a surface has no flux.</summary>
     public double HeatToAirWatts
@@ -94,6 +100,11 @@ public sealed class RoomResult
         foreach (RoomClosure closure in closures)
         {
             text.Append(closure).Append('\n');
+        }
+
+        foreach (JetFinding jet in jets)
+        {
+            text.Append(jet).Append('\n');
         }
 
         return text.ToString();

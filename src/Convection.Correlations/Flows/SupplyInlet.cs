@@ -24,6 +24,10 @@ public abstract record SupplyInlet : FlowDescriptor
     /// <summary>Effective area of the opening, where known.</summary>
     public Area? Opening => OpeningSquareMetres is { } squareMetres ? Area.FromSquareMeters(squareMetres) : null;
 
+    /// <summary>Data of the terminal and its design state, where known; they tell whether a cool jet stays at the ceiling.</summary>
+    /// <value>Null when not known.</value>
+    public TerminalData? Terminal { get; init; }
+
     /// <inheritdoc/>
     public override StateNeed Needs => StateNeed.Flow | StateNeed.SupplyTemperature;
 }

@@ -1,6 +1,7 @@
 using System;
 using System.Collections.Generic;
 using Convection.Correlations.Flows;
+using Convection.Correlations.Jets;
 using Convection.Correlations.Laws;
 using Convection.Correlations.Registry;
 using Convection.Correlations.Rooms;
@@ -131,6 +132,12 @@ internal sealed class SurfaceSelector
         Placement place = device.PlacementOf(surface.Name);
         if (device.Driver == FlowDriver.AirStream && place != Placement.InStream)
         {
+            return;
+        }
+
+        if (SurfaceForm.Of(surface) == SurfaceSet.Ceiling && JetFinding.OfDesign(device, room.Air.Celsius) is { IsAttached: false } jet)
+        {
+            AddGap(PartKind.Forced, SurfaceSide.Either, device, jet + " No correlation covers such a ceiling; the still-air one stays in force.");
             return;
         }
 

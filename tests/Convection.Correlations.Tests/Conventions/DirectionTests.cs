@@ -12,7 +12,7 @@ public class DirectionTests
     private const string Root = "Convection.Correlations.";
 
     // Lowest first.
-    private static readonly string[] Folders = ["Air", "Surfaces", "Flows", "Rooms", "Laws", "Registry", "Literature", "Selection", "Evaluation"];
+    private static readonly string[] Folders = ["Air", "Surfaces", "Flows", "Rooms", "Laws", "Registry", "Literature", "Jets", "Selection", "Evaluation"];
 
     public static TheoryData<string, string[]> Rules()
     {
