@@ -70,6 +70,8 @@ public class AirTableTests
     [InlineData(25, 3169.2, 1e-4)]
     [InlineData(30, 4246.0, 1e-4)]
     [InlineData(40, 7383.5, 1e-4)]
+    [InlineData(0.01, 611.7, 1e-3)]
+    [InlineData(10, 1228.0, 1e-3)]
     public void SaturationPressure_HylandWexler_Agrees(double celsius, double pascals, double tolerance)
         => Assert.Equal(pascals, WaterVapour.SaturationPascals(celsius), tolerance * pascals);
 
