@@ -16,6 +16,9 @@ public readonly record struct AirState
     internal const double LowestCelsius = -40, HighestCelsius = 100, LowestPascals = 50_000, HighestPascals = 120_000;
     private const double ZeroCelsius = 273.15;
 
+    /// <summary>The air that dimensional formulas are taken to embed: dry, at sea level, 22 °C.</summary>
+    internal static AirState OfLaboratories { get; } = new(22);
+
     private readonly double kelvins;
 
     /// <summary>Air of a given temperature, pressure and humidity.</summary>

@@ -51,7 +51,7 @@ public enum ConvectionFlags
     /// <summary>No correlation covers the surface or a running device; what stands in is in the explanation.</summary>
     GapInEvidence = 8192,
 
-    /// <summary>A dimensional formula was scaled to the pressure and humidity of the room's air.</summary>
+    /// <summary>A dimensional formula was scaled to the temperature, pressure and humidity of the room's air.</summary>
     ScaledToAir = 16384,
 
     /// <summary>A correlation was fixed by hand.</summary>

@@ -16,8 +16,8 @@ public sealed class LawBinding
     /// <param name="air">Properties at film temperature.</param>
     /// <param name="roomVolumeCubicMetres">Volume of the room [m³], in (0, 1 000 000]; only room-scale laws use it.</param>
     /// <param name="laboratoryAir">
-    /// Air in which dimensional formulas were measured, taken at the same film temperature: each such formula is then scaled
-    /// by its own property group. Null leaves dimensional formulas as printed.
+    /// Air that dimensional formulas embed: each such formula is then scaled by its own property group. Null leaves dimensional
+    /// formulas as printed.
     /// </param>
     /// <param name="isWarmer">True (the default) where the surface is warmer than the air; only laws for tilted surfaces ask.</param>
     /// <exception cref="ArgumentNullException">The surface is null.</exception>

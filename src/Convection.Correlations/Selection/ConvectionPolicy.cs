@@ -80,8 +80,8 @@ public sealed record ConvectionPolicy
         = 0.2;
 
     /// <summary>
-    /// True (the default) scales dimensional formulas, which were measured in dry air at sea level, to the pressure and
-    /// humidity of the room's air by their property groups.
+    /// True (the default) scales dimensional formulas, which are taken to embed dry air of 22 °C at sea level, to the temperature,
+    /// pressure and humidity of the room's air by their property groups.
     /// </summary>
     public bool ScaleToAir { get; init; } = true;
 

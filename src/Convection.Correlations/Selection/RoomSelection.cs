@@ -32,8 +32,8 @@ public sealed class RoomSelection
     /// <summary>The surfaces, in the order of the room.</summary>
     public IReadOnlyList<SurfaceSelection> Surfaces => surfaces;
 
-    /// <summary>True where dimensional formulas are scaled because the room's air is not dry air at sea level.</summary>
-    public bool IsScaledToAir => Policy.ScaleToAir && (Room.Air.Pascals != Air.AirState.StandardPascals || Room.Air.RelativeHumidity != 0);
+    /// <summary>True where dimensional formulas are scaled because the room's air is not dry air of 22 °C at sea level.</summary>
+    public bool IsScaledToAir => Policy.ScaleToAir && !Room.Air.Equals(Air.AirState.OfLaboratories);
 
     /// <summary>Chooses for every surface of a room.</summary>
     /// <param name="room">The room.</param>
@@ -52,7 +52,7 @@ public sealed class RoomSelection
         policy ??= ConvectionPolicy.Default;
         PolicyCheck.Against(policy, room, registry);
         Air.AirProperties properties = room.Air.Properties;
-        Air.AirProperties? laboratory = policy.ScaleToAir ? new Air.AirState(room.Air.Celsius).Properties : null;
+        Air.AirProperties? laboratory = policy.ScaleToAir ? Air.AirState.OfLaboratories.Properties : null;
         var chosen = new SurfaceSelection[room.Surfaces.Count];
         for (int i = 0; i < chosen.Length; i++)
         {

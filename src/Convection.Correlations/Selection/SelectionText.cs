@@ -46,8 +46,8 @@ internal static class SelectionText
         string text = "Air " + InvariantText.Fixed(air.Celsius, 1) + " °C, " + InvariantText.Fixed(air.Pascals / 1000, 2) + " kPa, "
             + InvariantText.Percent(air.RelativeHumidity, 0) + " humid; ";
         return text + (selection.IsScaledToAir
-            ? "dimensional formulas are scaled from dry air at sea level to it by their property groups."
-            : air.Pascals != Air.AirState.StandardPascals || air.RelativeHumidity != 0
+            ? "dimensional formulas are scaled to it from dry air of 22 °C at sea level by their property groups."
+            : !air.Equals(Air.AirState.OfLaboratories)
                 ? "dimensional formulas are not scaled to it, as the policy asks."
                 : "dimensional formulas stand as printed.");
     }

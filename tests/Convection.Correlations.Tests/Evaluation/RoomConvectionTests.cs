@@ -205,6 +205,11 @@ public class RoomConvectionTests
             / Alone(tall, null).Evaluate(30, 20, DeviceState.Off).CoefficientWattsPerSquareMetreKelvin;
         Assert.Equal(0.8783, buoyant, 5e-4);
 
+        // k·(gβρ²c_p/(μk))^(1/3) of Cengel's table A-15 (quoted), 30 °C over 22 °C between its rows: 0.9819.
+        double warm = Alone(tall, null, air: new AirState(30)).Evaluate(30, 20, DeviceState.Off).CoefficientWattsPerSquareMetreKelvin
+            / Alone(tall, null).Evaluate(30, 20, DeviceState.Off).CoefficientWattsPerSquareMetreKelvin;
+        Assert.Equal(0.9819, warm, 5e-4);
+
         ConvectionResult unscaled = Alone(ceiling, diffuser, new() { ScaleToAir = false }, new AirState(22, 83_400)).Evaluate(22, 22, supply);
         Assert.Equal(sea.ForcedCoefficientWattsPerSquareMetreKelvin, unscaled.ForcedCoefficientWattsPerSquareMetreKelvin);
     }
