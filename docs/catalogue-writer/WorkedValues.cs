@@ -4,16 +4,21 @@ using System.Linq;
 
 namespace Convection.Correlations.Catalogue;
 
-/// <summary>Numbers to check by hand: the table that the tests use, worked out apart from this code.</summary>
+/// <summary>Numbers to check by hand: the tables that the tests use, worked out apart from this code.</summary>
 internal static class WorkedValues
 {
-    public const string Path = "tests/Convection.Correlations.Tests/Data/law-check-values.csv";
-
     public static ILookup<string, string> Read(string root)
-    {
-        IEnumerable<string[]> rows = File.ReadLines(System.IO.Path.Combine(root, Path)).Skip(1).Select(l => l.Split(','));
-        return rows.ToLookup(r => r[0], Sentence);
-    }
+        => Rows(root, "law-check-values.csv").Select(r => (Id: r[0], Text: Sentence(r)))
+            .Concat(Rows(root, "mixing-check-values.csv").Select(r => (Id: r[0], Text: OfRule(r))))
+            .ToLookup(r => r.Id, r => r.Text);
+
+    private static IEnumerable<string[]> Rows(string root, string file)
+        => File.ReadLines(Path.Combine(root, "tests", "Convection.Correlations.Tests", "Data", file)).Skip(1).Select(l => l.Split(','));
+
+    private static string OfRule(string[] row) => row[1].Length > 0
+        ? "h_n = " + row[1] + ", h_f = " + row[2] + " → h = " + row[8] + " W/(m²·K)"
+        : "surface " + row[3] + " °C, room " + row[4] + " °C, supply " + row[5] + " °C, 6 air changes per hour, H 2.5 m or 4A/P 4 m, parts " + row[6] + " and "
+            + row[7] + " → h = " + row[8] + " W/(m²·K)";
 
     private static string Sentence(string[] row)
     {

@@ -89,6 +89,12 @@ public class AirTableTests
     public void StandardAtmosphere_Table_Agrees(double metres, double pascals)
         => Assert.Equal(pascals, AirState.AtAltitude(20, metres).Pascals, 2.5e-4 * pascals);
 
+    // Y.A. Cengel, example 7-2 (quoted): ν at 80 °C and 83.4 kPa is 2.548e-5 m²/s, from a table whose viscosity is within 1 % of the
+    // reference equation.
+    [Fact]
+    public void KinematicViscosity_AtReducedPressure_Agrees()
+        => Assert.Equal(2.548e-5, new AirState(80, 83_400).Properties.KinematicViscositySquareMetresPerSecond, 0.01 * 2.548e-5);
+
     [Fact]
     public void Properties_WholeDomain_AreFiniteAndPositive()
     {
