@@ -50,7 +50,9 @@ internal static class Churchill1977
         Law = law,
         Reference = ReferenceTemperature.FreeStream,
         Range = ValidityRange.NotKnown,
-        Evidence = new(EvidenceKind.Analytical, "theory and data of laminar boundary layers"),
+        Evidence = surfaces == SurfaceSet.Horizontal
+            ? new(EvidenceKind.Handbook, "a textbook's reading of the rule")
+            : new(EvidenceKind.Analytical, "theory and data of laminar boundary layers"),
         TextCheck = check,
         IsUnconfirmed = check >= TextCheck.RecalledHigh || law.IsOpposing,
         ContainsBuoyancy = true,

@@ -42,7 +42,7 @@ internal static class En12642
         Range = new(new RangeLimit(RangeVariable.TemperatureDifference, new(0, 9), RangeOrigin.Source)),
         Evidence = new(EvidenceKind.Standard, "a convention for embedded systems"),
         TextCheck = check,
-        IsUnconfirmed = check >= TextCheck.RecalledHigh,
+        IsUnconfirmed = check >= TextCheck.RecalledMedium,
         Doubts = doubts,
     };
 }

@@ -42,7 +42,7 @@ internal static class En12645
         Range = ValidityRange.NotKnown,
         Evidence = new(EvidenceKind.Standard, "a convention for embedded systems"),
         TextCheck = check,
-        IsUnconfirmed = check >= TextCheck.RecalledHigh,
+        IsUnconfirmed = check >= TextCheck.RecalledMedium,
         Doubts = doubts,
     };
 }

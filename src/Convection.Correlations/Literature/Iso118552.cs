@@ -46,7 +46,7 @@ internal static class Iso118552
         Range = ValidityRange.NotKnown,
         Evidence = new(EvidenceKind.Standard, "a convention for embedded systems"),
         TextCheck = check,
-        IsUnconfirmed = check >= TextCheck.RecalledHigh,
+        IsUnconfirmed = check >= TextCheck.RecalledMedium,
         Doubts = doubts,
     };
 }

@@ -126,6 +126,19 @@ public class CheckValueTests
         Assert.Equal(118, PublishedLiterature.Registry.Count);
     }
 
+    /// <summary>The list was kept apart from this code: how each text was checked, what it refers to, what it rests on, whether it is flagged.</summary>
+    [Fact]
+    public void Registry_Standing_IsThatOfTheList()
+    {
+        foreach (Dictionary<string, string> row in TestData.Rows("shipped-laws.csv"))
+        {
+            Correlation c = PublishedLiterature.Registry[row["id"]];
+            Assert.Equal(
+                (row["id"], row["textCheck"], row["reference"], row["evidence"], row["unconfirmed"]),
+                (c.Id.ToString(), c.TextCheck.ToString(), c.Reference.ToString(), c.Evidence.Kind.ToString(), c.IsUnconfirmed ? "yes" : "no"));
+        }
+    }
+
     [Theory]
     [MemberData(nameof(Examples))]
     public void Law_TextbookExample_Agrees(
