@@ -167,7 +167,7 @@ internal sealed class SurfaceSelector
         {
             SurfaceSide side = missing.Count == 2 ? SurfaceSide.Either : missing[0];
             AddGap(kind, side, device, "No correlation of this registry covers a " + SurfaceForm.Word(surface, side) + " in a room with "
-                + Article(device.Description) + " ('" + device.Name + "'); the still-air one stays in force.");
+                + Article(device.Description) + " ('" + device.Name + "'); the still-air one stays in force." + OtherwiseDescribed(device, side));
         }
 
         AddMerged(found);
@@ -178,6 +178,24 @@ internal sealed class SurfaceSelector
     /// <summary>A pin that fits this side; else one that fits no side and therefore serves both.</summary>
     private Correlation? PinFor(Correlation[] candidates, SurfaceSide side)
         => Array.Find(candidates, c => FitsSide(c, side)) ?? Array.Find(candidates, c => !Array.Exists(Sides, s => FitsSide(c, s)));
+
+    /// <summary>Forms that would serve if surface or device were described otherwise, so that a thin description is not taken for a gap in knowledge.</summary>
+    private string OtherwiseDescribed(FlowDescriptor device, SurfaceSide side)
+    {
+        var conditions = new List<string>();
+        foreach (Correlation c in registry.All)
+        {
+            bool elsewhere = c.Applies.Placement != Placement.Unspecified && device.PlacementOf(surface.Name) != c.Applies.Placement;
+            bool unmet = c.Applies.Condition is { } condition && !condition(surface, device);
+            if (c.Applies.Driver == device.Driver && (elsewhere || unmet) && policy.Objection(c) is null
+                && SurfaceForm.Match(c.Applies.Surfaces, surface) is 0 && (side == SurfaceSide.Either || FitsSide(c, side)))
+            {
+                conditions.Add(c.Id + (unmet ? " where " + c.Applies.ConditionText : " at another place to the device"));
+            }
+        }
+
+        return conditions.Count == 0 ? string.Empty : " Described otherwise it could take: " + string.Join("; ", conditions) + ".";
+    }
 
     private static string Article(string words) => (words[0] is 'a' or 'e' or 'i' or 'o' or 'u' ? "an " : "a ") + words;
 
