@@ -59,4 +59,7 @@ public enum ConvectionFlags
 
     /// <summary>A fixed value of a standard is in use.</summary>
     FixedValue = 65536,
+
+    /// <summary>The policy's minimum conductance moves the coefficient.</summary>
+    MinimumConductance = 131072,
 }

@@ -124,6 +124,15 @@ public readonly struct ConvectionResult : IEquatable<ConvectionResult>
     /// <summary>Coefficient referred to room air; null where there is none.</summary>
     public HeatTransferCoefficient? RoomAirCoefficient => Quantity(RoomAirCoefficientWattsPerSquareMetreKelvin);
 
+    /// <summary>The tangent of the flux, for an implicit heat balance.</summary>
+    /// <param name="surfaceCelsius">Temperature of the surface that this result was evaluated at [°C].</param>
+    /// <param name="roomCelsius">Temperature of the room air that this result was evaluated at [°C].</param>
+    /// <returns>The tangent; NaN in every member where the result is not valid.</returns>
+    public LinearFlux Linearise(double surfaceCelsius, double roomCelsius) => new(
+        FluxPerSurfaceKelvin,
+        FluxPerRoomKelvin,
+        FluxWattsPerSquareMetre - (FluxPerSurfaceKelvin * surfaceCelsius) - (FluxPerRoomKelvin * roomCelsius));
+
     /// <summary>The correlations behind the numbers. Makes a list at each call.</summary>
     public IReadOnlyList<CorrelationId> Correlations
     {

@@ -13,6 +13,8 @@ namespace Convection.Correlations.Evaluation;
 /// </remarks>
 internal static class FluxBlend
 {
+    private const double FloorHalfWidth = 0.04, EqualHalfWidth = 0.05;
+
     public static Flux Assisting(Flux a, Flux b, double n, double counter)
     {
         if (Opposite(a, b))
@@ -37,7 +39,7 @@ internal static class FluxBlend
             b);
     }
 
-    public static Flux Opposing(Flux a, Flux b, double n, double floor)
+    public static Flux Opposing(Flux a, Flux b, double n, double floor, bool isJoined)
     {
         if (Opposite(a, b))
         {
@@ -51,14 +53,13 @@ internal static class FluxBlend
 
         if (a.Value == 0)
         {
-            return AtRest(Opposing(a.Surface, b.Surface, n, floor), Opposing(a.Room, b.Room, n, floor), Opposing(a.Supply, b.Supply, n, floor));
+            return AtRest(
+                Opposing(a.Surface, b.Surface, n, floor, isJoined), Opposing(a.Room, b.Room, n, floor, isJoined), Opposing(a.Supply, b.Supply, n, floor, isJoined));
         }
 
         double ratio = b.Value / a.Value;
-        double rest = Math.Pow(1 - Power(ratio, n), 1 / n);
-        return rest <= floor
-            ? a.Times(floor)
-            : Flux.Chain(a.Value * rest, Math.Pow(rest, 1 - n), a, -Power(ratio, n - 1) * Math.Pow(rest, 1 - n), b);
+        (double share, double slope) = isJoined ? JoinedShare(ratio, n, floor) : PublishedShare(ratio, n, floor);
+        return Flux.Chain(a.Value * share, share - (ratio * slope), a, slope, b);
     }
 
     public static Flux Counter(Flux a, Flux b, double n)
@@ -86,7 +87,44 @@ internal static class FluxBlend
 
     private static double Assisting(double a, double b, double n, double counter) => AreZero(a, b) ? 0 : Assisting(Of(a), Of(b), n, counter).Value;
 
-    private static double Opposing(double a, double b, double n, double floor) => AreZero(a, b) ? 0 : Opposing(Of(a), Of(b), n, floor).Value;
+    private static double Opposing(double a, double b, double n, double floor, bool isJoined)
+        => AreZero(a, b) ? 0 : Opposing(Of(a), Of(b), n, floor, isJoined).Value;
+
+    /// <summary>What is left of the larger part, and its slope over the ratio of the smaller to the larger: the rule as published.</summary>
+    private static (double Share, double Slope) PublishedShare(double ratio, double n, double floor)
+    {
+        double rest = Math.Pow(1 - Power(ratio, n), 1 / n);
+        return rest <= floor ? (floor, 0) : (rest, -Power(ratio, n - 1) * Math.Pow(rest, 1 - n));
+    }
+
+    /// <summary>The same with its two kinks joined: where the floor sets in by a cubic, and at equal parts by a parabola.</summary>
+    private static (double Share, double Slope) JoinedShare(double ratio, double n, double floor)
+    {
+        double corner = Math.Pow(1 - Power(floor, n), 1 / n);
+        double half = Math.Min(FloorHalfWidth, 0.5 * Math.Min(1 - corner, corner));
+        double equal = Math.Min(EqualHalfWidth, 1 - corner - half);
+
+        // Near equality the larger part gives way to a smooth maximum: mean + d²/(4w) + w/4 of the difference d, w = equal·mean.
+        double mean = 0.5 * (1 + ratio), difference = 1 - ratio, width = equal * mean;
+        if (difference < width)
+        {
+            double share = mean + (difference * difference / (4 * width)) + (width / 4);
+            double slope = 0.5 - (difference / (2 * width)) - (difference * difference * equal / (8 * width * width)) + (equal / 8);
+            return (floor * share, floor * slope);
+        }
+
+        if (ratio <= corner - half || ratio >= corner + half)
+        {
+            return PublishedShare(ratio, n, floor);
+        }
+
+        (double start, double startSlope) = PublishedShare(corner - half, n, floor);
+        double u = (ratio - corner + half) / (2 * half);
+        double low = (1 + (2 * u)) * (1 - u) * (1 - u), tangent = u * (1 - u) * (1 - u) * 2 * half;
+        return (
+            (low * start) + ((1 - low) * floor) + (tangent * startSlope),
+            (6 * u * (u - 1) * (start - floor) / (2 * half)) + ((1 - u) * (1 - (3 * u)) * startSlope));
+    }
 
     private static double Counter(double a, double b, double n) => AreZero(a, b) ? 0 : Counter(Of(a), Of(b), n).Value;
 

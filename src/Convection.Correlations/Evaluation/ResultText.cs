@@ -41,7 +41,7 @@ internal static class ResultText
     public static string Of(ConvectionFlags flags)
     {
         var words = new List<string>();
-        for (var flag = ConvectionFlags.BelowTestedRange; flag <= ConvectionFlags.FixedValue; flag = (ConvectionFlags)((int)flag * 2))
+        for (var flag = ConvectionFlags.BelowTestedRange; flag <= ConvectionFlags.MinimumConductance; flag = (ConvectionFlags)((int)flag * 2))
         {
             if ((flags & flag) != 0)
             {
@@ -71,6 +71,7 @@ internal static class ResultText
         ConvectionFlags.ScaledToAir => "scaled to air",
         ConvectionFlags.Pinned => "pinned",
         ConvectionFlags.FixedValue => "fixed value",
+        ConvectionFlags.MinimumConductance => "minimum conductance",
         _ => string.Empty,
     };
 }

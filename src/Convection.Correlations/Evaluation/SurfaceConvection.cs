@@ -19,16 +19,18 @@ public sealed class SurfaceConvection
 {
     private const double LowestCelsius = -273.15, HighestCelsius = 10_000, HighestFlow = 1e6, HighestSpeed = 1000;
     private const double BuoyantUpTo = 0.2, ForcedFrom = 0.8;
+    private const int MinimumExponent = 6;
 
     private readonly SurfacePlan plan;
     private readonly BlendRule blend;
-    private readonly double heaterRamp;
+    private readonly double heaterRamp, minimumConductance;
 
     internal SurfaceConvection(SurfacePlan plan, RoomSelection selection)
     {
         this.plan = plan;
         blend = selection.Policy.Blend;
         heaterRamp = selection.Policy.HeaterRamp;
+        minimumConductance = selection.Policy.MinimumConductance;
     }
 
     /// <summary>The surface.</summary>
@@ -178,12 +180,24 @@ public sealed class SurfaceConvection
 
         double share = weights == 0 ? 0 : (1 - rest) / weights;
         double coefficient = (rest * still.Coefficient) + (share * heated);
-        double slope = coefficient + (rest * still.Sensitivity) + (share * heatedSensitivity);
+        double sensitivity = (rest * still.Sensitivity) + (share * heatedSensitivity);
+        if (minimumConductance > 0)
+        {
+            double raised = WithMinimum(coefficient);
+            sum.Flags |= raised > 1.001 * coefficient ? ConvectionFlags.MinimumConductance : ConvectionFlags.None;
+            sensitivity *= Math.Pow(coefficient / raised, MinimumExponent - 1);
+            coefficient = raised;
+        }
+
+        double slope = coefficient + sensitivity;
         sum.BuoyantCoefficient = coefficient;
         sum.Buoyant = new Flux(coefficient * sum.Difference, slope, -slope, 0);
         sum.MixedWeight = weights == 0 ? 0 : (1 - rest) * sum.MixedWeight / weights;
         return ConvectionStatus.Valid;
     }
+
+    private double WithMinimum(double coefficient)
+        => Math.Pow(Math.Pow(coefficient, MinimumExponent) + Math.Pow(minimumConductance, MinimumExponent), 1.0 / MinimumExponent);
 
     private ConvectionStatus AddForced(ref FluxSum sum, double surfaceCelsius, double roomCelsius, DeviceStates devices)
     {
@@ -247,7 +261,7 @@ public sealed class SurfaceConvection
     {
         Flux assisting = sum.Assisting(blend), opposing = sum.Opposing(blend), transverse = sum.Transverse(blend);
         Flux total = FluxBlend.Assisting(sum.Buoyant, assisting, blend.AssistingExponent, blend.OpposingExponent);
-        total = FluxBlend.Opposing(total, opposing, blend.OpposingExponent, blend.OpposingFloor);
+        total = FluxBlend.Opposing(total, opposing, blend.OpposingExponent, blend.OpposingFloor, blend.JoinsKinks);
         total = FluxBlend.Assisting(total, transverse, blend.TransverseExponent, blend.OpposingExponent);
         Flux forced = FluxSum.Pool(FluxSum.Pool(assisting, opposing, blend), transverse, blend);
         foreach (GapPlan gap in plan.Gaps)

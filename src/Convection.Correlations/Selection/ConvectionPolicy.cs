@@ -80,6 +80,21 @@ public sealed record ConvectionPolicy
         = 0.2;
 
     /// <summary>
+    /// Least buoyant coefficient [W/(m²·K)], 0 to 5, for solvers that need a conductance where surface and air are equally warm. The
+    /// default, 0, leaves the laws alone.
+    /// </summary>
+    /// <remarks>
+    /// No source supplies one; it is a numerical aid. The coefficient becomes (h⁶ + h_min⁶)^(1/6): smooth, 12 % above h where both are equal,
+    /// 0.3 % where h is twice as large. Results that it moves by more than 0.1 % say so.
+    /// </remarks>
+    /// <exception cref="ArgumentOutOfRangeException">Outside its interval or not a number.</exception>
+    public double MinimumConductance
+    {
+        get;
+        init => field = Require.Within(value, 0, 5, "Minimum conductance", "W/(m²·K)", nameof(MinimumConductance));
+    }
+
+    /// <summary>
     /// True (the default) scales dimensional formulas, which are taken to embed dry air of 22 °C at sea level, to the temperature,
     /// pressure and humidity of the room's air by their property groups.
     /// </summary>

@@ -32,7 +32,7 @@ public class BlendTests
     // Churchill (1977): the cubes subtract in opposing flow (the value worked apart from this code).
     [Fact]
     public void Opposing_FarApart_CubesSubtract()
-        => Assert.Equal(2.66840, FluxBlend.Opposing(Part(2), Part(3), 3, 0.8).Value, 6e-6);
+        => Assert.Equal(2.66840, FluxBlend.Opposing(Part(2), Part(3), 3, 0.8, isJoined: false).Value, 6e-6);
 
     // I. Beausoleil-Morrison, Energy and Buildings 33(4), 351-361, 2001 (recalled, high): never below 0.8 of the larger part.
     [Theory]
@@ -40,7 +40,7 @@ public class BlendTests
     [InlineData(10, 9)]
     [InlineData(-9, -10)]
     public void Opposing_NearlyEqual_LeavesTheFloor(double a, double b)
-        => Assert.Equal(0.8 * 10 * Math.Sign(a), FluxBlend.Opposing(Part(a), Part(b), 3, 0.8).Value, 1e-12);
+        => Assert.Equal(0.8 * 10 * Math.Sign(a), FluxBlend.Opposing(Part(a), Part(b), 3, 0.8, isJoined: false).Value, 1e-12);
 
     [Fact]
     public void OppositeHeat_Equal_Balances_AndUnequal_LeavesLessThanTheLarger()
@@ -62,7 +62,8 @@ public class BlendTests
                 foreach (Func<Flux, Flux, Flux> blend in new Func<Flux, Flux, Flux>[]
                 {
                     (x, y) => FluxBlend.Assisting(x, y, n, opposing),
-                    (x, y) => FluxBlend.Opposing(x, y, opposing, 0.8),
+                    (x, y) => FluxBlend.Opposing(x, y, opposing, 0.8, isJoined: false),
+                    (x, y) => FluxBlend.Opposing(x, y, opposing, 0.8, isJoined: true),
                     (x, y) => FluxBlend.Counter(x, y, opposing),
                 })
                 {
@@ -93,6 +94,35 @@ public class BlendTests
         }
 
         Assert.InRange(steepest, 1, 1.5 + 1e-9);
+    }
+
+    /// <summary>The joined rule is the published one outside its bands, deviates by no more than stated inside, and has no kink.</summary>
+    [Theory]
+    [InlineData(3, 0.8, 0.013)]
+    [InlineData(3, 0.5, 0.039)]
+    [InlineData(2, 0.8, 0.013)]
+    [InlineData(4, 0.9, 0.013)]
+    public void Opposing_Joined_StaysNearThePublishedRuleAndHasNoKink(double n, double floor, double allowed)
+    {
+        double corner = Math.Pow(1 - Math.Pow(floor, n), 1 / n), largest = 0, before = double.NaN;
+        for (int i = 0; i <= 40_000; i++)
+        {
+            double b = i / 20_000.0;
+            Flux joined = FluxBlend.Opposing(new Flux(1, 0, 0, 0), new Flux(b, 1, 0, 0), n, floor, isJoined: true);
+            double published = FluxBlend.Opposing(Part(1), Part(b), n, floor, isJoined: false).Value;
+            double ratio = Math.Min(b, 1 / b), deviation = Math.Abs((joined.Value / published) - 1);
+            largest = Math.Max(largest, deviation);
+            if (Math.Abs(ratio - corner) > 0.0401 && ratio < 0.951)
+            {
+                Assert.Equal(0, deviation, 1e-12);
+            }
+
+            // A kink would step by about 1; the steepest bend of the joins is 0.03 over one of these steps.
+            Assert.True(double.IsNaN(before) || Math.Abs(joined.Surface - before) < 0.03, "slope steps at " + b);
+            before = joined.Surface;
+        }
+
+        Assert.InRange(largest, 0.001, allowed);
     }
 
     private static Flux Part(double value) => new(value, 0, 0, 0);
