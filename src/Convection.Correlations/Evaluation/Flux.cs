@@ -19,6 +19,9 @@ internal readonly struct Flux
 
     public double Supply { get; }
 
+    /// <summary>True for no flux at all, in value and slopes.</summary>
+    public bool IsNothing => Value == 0 && Surface == 0 && Room == 0 && Supply == 0;
+
     public Flux Times(double factor) => new(factor * Value, factor * Surface, factor * Room, factor * Supply);
 
     public Flux Plus(Flux other) => new(Value + other.Value, Surface + other.Surface, Room + other.Room, Supply + other.Supply);

@@ -17,6 +17,11 @@ internal static class FluxBlend
 
     public static Flux Assisting(Flux a, Flux b, double n, double counter)
     {
+        if (a.IsNothing || b.IsNothing)
+        {
+            return b.IsNothing ? a : b;
+        }
+
         if (Opposite(a, b))
         {
             return Counter(a, b, counter);
@@ -41,6 +46,11 @@ internal static class FluxBlend
 
     public static Flux Opposing(Flux a, Flux b, double n, double floor, bool isJoined)
     {
+        if (a.IsNothing || b.IsNothing)
+        {
+            return b.IsNothing ? a : b;
+        }
+
         if (Opposite(a, b))
         {
             return Counter(a, b, n);

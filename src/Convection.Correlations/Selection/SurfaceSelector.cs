@@ -135,14 +135,14 @@ internal sealed class SurfaceSelector
             return;
         }
 
-        if (SurfaceForm.Of(surface) == SurfaceSet.Ceiling && JetFinding.OfDesign(device, room.Air.Celsius) is { IsAttached: false } jet)
+        Correlation[] devicePins = [.. pins.FindAll(c => c.Applies.Driver == device.Driver
+            || (!HasDevice(c.Applies.Driver) && !IsByDifference(c) && Gives(device, c.Law.DrivenBy)))];
+        if (devicePins.Length == 0 && SurfaceForm.Of(surface) == SurfaceSet.Ceiling && JetFinding.OfDesign(device, room.Air.Celsius) is { IsAttached: false } jet)
         {
             AddGap(PartKind.Forced, SurfaceSide.Either, device, jet + " No correlation covers such a ceiling; the still-air one stays in force.");
             return;
         }
 
-        Correlation[] devicePins = [.. pins.FindAll(c => c.Applies.Driver == device.Driver
-            || (!HasDevice(c.Applies.Driver) && !IsByDifference(c) && Gives(device, c.Law.DrivenBy)))];
         var found = new List<SelectedPart>();
         var missing = new List<SurfaceSide>();
         foreach (SurfaceSide side in Sides)
