@@ -12,8 +12,8 @@ namespace Convection.Correlations.Evaluation;
 /// </remarks>
 public readonly struct ConvectionResult : IEquatable<ConvectionResult>
 {
-    private readonly Flux total, buoyant, forced;
-    private readonly double roomDifference, buoyantCoefficient, forcedCoefficient;
+    private readonly Flux total;
+    private readonly double buoyant, forced, roomDifference, buoyantCoefficient, forcedCoefficient;
     private readonly ReferenceTemperature forcedReference;
     private readonly CorrelationId[]? ids;
     private readonly ulong used;
@@ -22,8 +22,8 @@ public readonly struct ConvectionResult : IEquatable<ConvectionResult>
 
     internal ConvectionResult(
         Flux total,
-        Flux buoyant,
-        Flux forced,
+        double buoyant,
+        double forced,
         double roomDifference,
         double buoyantCoefficient,
         double forcedCoefficient,
@@ -84,14 +84,14 @@ public readonly struct ConvectionResult : IEquatable<ConvectionResult>
     public double RoomAirCoefficientWattsPerSquareMetreKelvin
         => !IsValid ? double.NaN
             : Math.Abs(roomDifference) > 1e-9 ? total.Value / roomDifference
-            : forced.Value == 0 ? buoyantCoefficient
+            : forced == 0 ? buoyantCoefficient
             : double.NaN;
 
     /// <summary>Buoyant flux before blending [W/m²], a heater's plume included.</summary>
-    public double BuoyantFluxWattsPerSquareMetre => IsValid ? buoyant.Value : double.NaN;
+    public double BuoyantFluxWattsPerSquareMetre => IsValid ? buoyant : double.NaN;
 
     /// <summary>Forced flux before blending [W/m²], of all devices together.</summary>
-    public double ForcedFluxWattsPerSquareMetre => IsValid ? forced.Value : double.NaN;
+    public double ForcedFluxWattsPerSquareMetre => IsValid ? forced : double.NaN;
 
     /// <summary>Coefficient of the buoyant part [W/(m²·K)], against room air.</summary>
     public double BuoyantCoefficientWattsPerSquareMetreKelvin => IsValid ? buoyantCoefficient : double.NaN;
@@ -107,8 +107,8 @@ public readonly struct ConvectionResult : IEquatable<ConvectionResult>
     {
         get
         {
-            double sum = Math.Abs(buoyant.Value) + Math.Abs(forced.Value);
-            return !IsValid ? double.NaN : sum == 0 ? 0 : Math.Abs(forced.Value) / sum;
+            double sum = Math.Abs(buoyant) + Math.Abs(forced);
+            return !IsValid ? double.NaN : sum == 0 ? 0 : Math.Abs(forced) / sum;
         }
     }
 
@@ -154,7 +154,7 @@ public readonly struct ConvectionResult : IEquatable<ConvectionResult>
     private static HeatTransferCoefficient? Quantity(double wattsPerSquareMetreKelvin)
         => double.IsNaN(wattsPerSquareMetreKelvin) ? null : HeatTransferCoefficient.FromWattsPerSquareMeterKelvin(wattsPerSquareMetreKelvin);
 
-    private bool ForcedLeads => Math.Abs(forced.Value) > Math.Abs(buoyant.Value);
+    private bool ForcedLeads => Math.Abs(forced) > Math.Abs(buoyant);
 
     /// <summary>Compares every member.</summary>
     /// <param name="left">One result.</param>
@@ -175,7 +175,7 @@ public readonly struct ConvectionResult : IEquatable<ConvectionResult>
             && FluxPerSurfaceKelvin.Equals(other.FluxPerSurfaceKelvin)
             && FluxPerRoomKelvin.Equals(other.FluxPerRoomKelvin)
             && FluxPerSupplyKelvin.Equals(other.FluxPerSupplyKelvin)
-            && buoyant.Value.Equals(other.buoyant.Value) && forced.Value.Equals(other.forced.Value)
+            && buoyant.Equals(other.buoyant) && forced.Equals(other.forced)
             && CoefficientWattsPerSquareMetreKelvin.Equals(other.CoefficientWattsPerSquareMetreKelvin);
 
     /// <inheritdoc/>

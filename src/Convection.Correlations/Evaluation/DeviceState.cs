@@ -39,6 +39,8 @@ public readonly record struct DeviceState
     /// <summary>Output of a heater as a fraction of its full output [-], 0 to 1.</summary>
     public double OutputFraction => output;
 
+    internal bool IsRunning => !(flow <= 0 && speed <= 0 && output <= 0);
+
     /// <summary>Supply air that flows.</summary>
     /// <param name="cubicMetresPerSecond">Volume flow [m³/s], 0 to 1 000 000, recirculated air included.</param>
     /// <param name="celsius">Supply temperature [°C]; NaN where not known, which only a flow of zero allows.</param>

@@ -10,8 +10,6 @@ namespace Convection.Correlations.Evaluation;
 internal sealed class ForcedPlan
 {
     private readonly LawUse? warmer, cooler;
-    private readonly DrivingVariable drivenBy;
-    private readonly double scale;
 
     public ForcedPlan(int device, RoomContext room, DrivingVariable drivenBy, LawUse? warmer, LawUse? cooler, StreamDirection stream)
     {
@@ -19,26 +17,31 @@ internal sealed class ForcedPlan
         Stream = stream;
         this.warmer = warmer;
         this.cooler = cooler;
-        this.drivenBy = drivenBy;
-        scale = Scale(drivenBy, room.Devices[device], room.VolumeCubicMetres);
+        DrivenBy = drivenBy;
+        ScaleOfFlow = Scale(drivenBy, room.Devices[device], room.VolumeCubicMetres);
     }
 
     public int Device { get; }
 
     public StreamDirection Stream { get; }
 
+    public DrivingVariable DrivenBy { get; }
+
+    /// <summary>Turns a flow, or for the jet momentum number its square, into the flow variable of the laws.</summary>
+    public double ScaleOfFlow { get; }
+
     public LawUse? On(bool isWarmer) => isWarmer ? warmer : cooler;
 
     /// <summary>The flow variable that the laws use, from the flow or speed of the state.</summary>
-    public double DrivingValue(DeviceState state) => drivenBy switch
+    public double DrivingValue(DeviceState state) => DrivenBy switch
     {
         DrivingVariable.Speed => state.SpeedMetresPerSecond,
-        DrivingVariable.JetMomentum => scale * state.FlowCubicMetresPerSecond * state.FlowCubicMetresPerSecond,
-        _ => scale * state.FlowCubicMetresPerSecond,
+        DrivingVariable.JetMomentum => ScaleOfFlow * state.FlowCubicMetresPerSecond * state.FlowCubicMetresPerSecond,
+        _ => ScaleOfFlow * state.FlowCubicMetresPerSecond,
     };
 
     /// <summary>The flow [m³/s] that gives a value of the flow variable.</summary>
-    public double FlowAt(double driving) => drivenBy == DrivingVariable.JetMomentum ? Math.Sqrt(driving / scale) : driving / scale;
+    public double FlowAt(double driving) => DrivenBy == DrivingVariable.JetMomentum ? Math.Sqrt(driving / ScaleOfFlow) : driving / ScaleOfFlow;
 
     private static double Scale(DrivingVariable drivenBy, FlowDescriptor device, double volume) => drivenBy switch
     {

@@ -44,55 +44,39 @@ internal sealed class LawUse
     /// <summary>Lowest value of the driving variable that the laws cover; a forced flux fades below it.</summary>
     public double Lowest => lowest;
 
-    public int Count => ladder.Count;
+    /// <summary>Highest value of the driving variable that the laws cover.</summary>
+    public double Highest => highest;
 
     public LawLadder Ladder => ladder;
 
-    /// <summary>Coefficient and sensitivity at x, and what has to be said about them.</summary>
+    /// <summary>What has to be said about the laws at x.</summary>
     /// <returns>False where the policy refuses.</returns>
-    public bool TryEvaluate(double x, out LawValue law, out ConvectionFlags flags, out ulong used)
+    public bool Remark(double x, ref Remarks remarks)
     {
-        flags = ConvectionFlags.None;
         double at = x;
         if (x < lowest && fadesBelow)
         {
             at = lowest;
-            flags |= ConvectionFlags.FlowFaded;
+            remarks.Flags |= ConvectionFlags.FlowFaded;
         }
         else if (rule == OutOfRangeRule.HoldAtLimit && (x < lowest || x > highest))
         {
             at = x < lowest ? lowest : highest;
-            flags |= ConvectionFlags.HeldAtLimit;
+            remarks.Flags |= ConvectionFlags.HeldAtLimit;
         }
 
-        law = ladder.Evaluate(at, out int lower, out double weightOfNext);
-        used = 1UL << (firstBit + lower);
-        flags |= always[lower];
+        int lower = ladder.Find(at, out double weightOfNext);
+        remarks.Used |= 1UL << (firstBit + lower);
+        remarks.Flags |= always[lower];
         if (weightOfNext > 0)
         {
-            used |= 1UL << (firstBit + lower + 1);
-            flags |= always[lower + 1];
+            remarks.Used |= 1UL << (firstBit + lower + 1);
+            remarks.Flags |= always[lower + 1];
         }
 
         RangeStanding where = ladder[weightOfNext > 0.5 ? lower + 1 : lower].Range.StandingAt(x);
-        flags |= Flag(where);
-        if (rule == OutOfRangeRule.Refuse && x > 0 && (where is RangeStanding.Below or RangeStanding.Above or RangeStanding.SurfaceOutside))
-        {
-            return false;
-        }
-
-        law = at == x ? law : (flags & ConvectionFlags.FlowFaded) != 0 ? Fade(law, x / lowest) : new LawValue(law.Coefficient, 0);
-        return true;
-    }
-
-    /// <summary>From h = 0 with no slope at no flow to the law's own value and slope at its lowest flow.</summary>
-    private static LawValue Fade(LawValue atLowest, double u)
-    {
-        // A steeper slope than 3h would let the cubic dip below zero.
-        double h = atLowest.Coefficient, slope = Math.Min(atLowest.Sensitivity, 3 * h);
-        return new LawValue(
-            (h * u * u * (3 - (2 * u))) + (slope * u * u * (u - 1)),
-            (h * 6 * u * u * (1 - u)) + (slope * u * u * ((3 * u) - 2)));
+        remarks.Flags |= Flag(where);
+        return rule != OutOfRangeRule.Refuse || x <= 0 || where is not (RangeStanding.Below or RangeStanding.Above or RangeStanding.SurfaceOutside);
     }
 
     private static ConvectionFlags Flag(RangeStanding where) => where switch

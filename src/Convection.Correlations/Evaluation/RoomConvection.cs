@@ -135,14 +135,7 @@ public sealed class RoomConvection
         double conductance = 0;
         foreach (SurfaceConvection surface in surfaces)
         {
-            foreach (ForcedPlan forced in surface.Plan.Forced)
-            {
-                if (forced.Device == device && forced.On(true) is { Reference: ReferenceTemperature.SupplyAir } use)
-                {
-                    use.TryEvaluate(forced.DrivingValue(DeviceState.Supply(flow, double.NaN)), out Laws.LawValue law, out _, out _);
-                    conductance += law.Coefficient * surface.Surface.AreaSquareMetres;
-                }
-            }
+            conductance += surface.SupplyCoefficient(device, flow) * surface.Surface.AreaSquareMetres;
         }
 
         return conductance == 0

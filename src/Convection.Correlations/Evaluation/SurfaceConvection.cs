@@ -1,12 +1,16 @@
 using System;
-using System.Collections.Generic;
+using Convection.Correlations.Evaluation.Kernels;
 using Convection.Correlations.Flows;
-using Convection.Correlations.Laws;
 using Convection.Correlations.Registry;
 using Convection.Correlations.Rooms;
 using Convection.Correlations.Selection;
 using Convection.Correlations.Surfaces;
 using UnitsNet;
+#if NET
+using Kernel = Convection.Correlations.Evaluation.Kernels.FluxKernel<Convection.Correlations.Evaluation.Kernels.ScalarLane>;
+#else
+using Kernel = Convection.Correlations.Evaluation.Kernels.FluxKernel;
+#endif
 
 namespace Convection.Correlations.Evaluation;
 
@@ -19,18 +23,17 @@ public sealed class SurfaceConvection
 {
     private const double LowestCelsius = -273.15, HighestCelsius = 10_000, HighestFlow = 1e6, HighestSpeed = 1000;
     private const double BuoyantUpTo = 0.2, ForcedFrom = 0.8;
-    private const int MinimumExponent = 6;
+
+    // (1.001⁶/(1.001⁶ − 1))^(1/6): where h is raised by more than 0.1 %, the raised h is below this many times the minimum.
+    private const double MinimumTells = 2.3462;
 
     private readonly SurfacePlan plan;
-    private readonly BlendRule blend;
-    private readonly double heaterRamp, minimumConductance;
+    private readonly SurfaceShape shape;
 
     internal SurfaceConvection(SurfacePlan plan, RoomSelection selection)
     {
         this.plan = plan;
-        blend = selection.Policy.Blend;
-        heaterRamp = selection.Policy.HeaterRamp;
-        minimumConductance = selection.Policy.MinimumConductance;
+        shape = new SurfaceShape(plan, selection.Policy);
     }
 
     /// <summary>The surface.</summary>
@@ -40,6 +43,8 @@ public sealed class SurfaceConvection
     public SurfaceSelection Selection => plan.Selection;
 
     internal SurfacePlan Plan => plan;
+
+    internal SurfaceShape Shape => shape;
 
     /// <summary>Binds one surface without describing the rest of its room.</summary>
     /// <param name="surface">The surface.</param>
@@ -79,13 +84,17 @@ public sealed class SurfaceConvection
     public ConvectionResult Evaluate(double surfaceCelsius, double roomCelsius, DeviceState device)
         => Evaluate(surfaceCelsius, roomCelsius, new DeviceStates(device));
 
-    internal ConvectionResult Evaluate(double surfaceCelsius, double roomCelsius, DeviceStates devices)
+    internal unsafe ConvectionResult Evaluate(double surfaceCelsius, double roomCelsius, DeviceStates devices)
     {
         ConvectionStatus status = Check(surfaceCelsius, LowestCelsius, HighestCelsius);
         status = Worse(status, Check(roomCelsius, LowestCelsius, HighestCelsius));
-        foreach (int device in plan.Devices)
+        double* lanes = stackalloc double[DeviceLanes.Count * plan.Devices.Length];
+        for (int slot = 0; slot < plan.Devices.Length; slot++)
         {
-            status = Worse(status, Check(plan.Room.Devices[device], devices[device]));
+            int device = plan.Devices[slot];
+            DeviceState state = devices[device];
+            status = Worse(status, Check(plan.Room.Devices[device], state));
+            Write(state, lanes + (DeviceLanes.Count * slot));
         }
 
         if (status != ConvectionStatus.Valid)
@@ -93,26 +102,42 @@ public sealed class SurfaceConvection
             return new ConvectionResult(status);
         }
 
-        double difference = surfaceCelsius - roomCelsius;
-        bool isWarmer = difference >= 0;
-        var sum = new FluxSum(difference);
-        status = AddBuoyant(ref sum, isWarmer, devices);
-        if (status == ConvectionStatus.Valid)
+        Remarks remarks = plan.Remark(surfaceCelsius, roomCelsius, devices, shape.HeaterRamp);
+        if (remarks.Status != ConvectionStatus.Valid)
         {
-            status = AddForced(ref sum, surfaceCelsius, roomCelsius, devices);
+            return new ConvectionResult(remarks.Status);
         }
 
-        return status == ConvectionStatus.Valid ? Finish(sum, isWarmer, devices) : new ConvectionResult(status);
+        fixed (double* numbers = shape.Numbers)
+        {
+            Kernel.Surface(shape, new Kernel.Numbers(numbers), new(surfaceCelsius), new(roomCelsius), lanes, out Kernel.Outcome sum);
+            return Result(sum, surfaceCelsius - roomCelsius, remarks);
+        }
     }
 
-    private static ConvectionStatus Worse(ConvectionStatus known, ConvectionStatus next) => known == ConvectionStatus.Valid ? next : known;
+    /// <summary>The coefficient that a device's forms have at a flow, against supply air [W/(m²·K)]; zero for forms with another reference.</summary>
+    internal unsafe double SupplyCoefficient(int device, double flowCubicMetresPerSecond)
+    {
+        double coefficient = 0;
+        for (int i = 0; i < plan.Forced.Length; i++)
+        {
+            ForcedPlan forced = plan.Forced[i];
+            if (forced.Device == device && shape.Forced[i].Warmer is { Reference: ReferenceTemperature.SupplyAir } side)
+            {
+                fixed (double* numbers = shape.Numbers)
+                {
+                    double driving = forced.DrivingValue(DeviceState.Supply(flowCubicMetresPerSecond, double.NaN));
+                    Kernel.Law(side.Law, new Kernel.Numbers(numbers), new(driving), out ScalarLane h, out _);
+                    coefficient += h.Value;
+                }
+            }
+        }
 
-    private static ConvectionStatus Check(double value, double lowest, double highest)
-        => double.IsNaN(value) || double.IsInfinity(value) ? ConvectionStatus.NotFinite
-            : value < lowest || value > highest ? ConvectionStatus.Unphysical
-            : ConvectionStatus.Valid;
+        return coefficient;
+    }
 
-    private static ConvectionStatus Check(FlowDescriptor device, DeviceState state)
+    /// <summary>Whether a device's state can be used.</summary>
+    internal static ConvectionStatus Check(FlowDescriptor device, DeviceState state)
     {
         if (state.Gives == StateNeed.None)
         {
@@ -136,166 +161,55 @@ public sealed class SurfaceConvection
         return Worse(status, needsTemperature && double.IsNaN(state.AirCelsius) ? ConvectionStatus.SupplyTemperatureMissing : ConvectionStatus.Valid);
     }
 
-    private static bool IsRunning(DeviceState state)
-        => !(state.FlowCubicMetresPerSecond <= 0 && state.SpeedMetresPerSecond <= 0 && state.OutputFraction <= 0);
-
-    /// <summary>Still air, giving way to heaters as their output rises.</summary>
-    private ConvectionStatus AddBuoyant(ref FluxSum sum, bool isWarmer, DeviceStates devices)
+    /// <summary>Writes what a kernel reads of a device.</summary>
+    internal static unsafe void Write(DeviceState state, double* lanes)
     {
-        double rest = 1, weights = 0;
-        double heated = 0, heatedSensitivity = 0;
-        foreach (HeaterPlan heater in plan.Heaters)
-        {
-            double weight = HeaterPlan.Weight(devices[heater.Device].OutputFraction, heaterRamp);
-            if (weight == 0 || heater.On(isWarmer) is not { } use)
-            {
-                continue;
-            }
-
-            if (!sum.Use(use, Math.Abs(sum.Difference), out LawValue law))
-            {
-                return ConvectionStatus.OutOfRangeRefused;
-            }
-
-            rest *= 1 - weight;
-            weights += weight;
-            heated += weight * law.Coefficient;
-            heatedSensitivity += weight * law.Sensitivity;
-            sum.MixedWeight += use.IsMixed ? weight : 0;
-        }
-
-        var still = new LawValue(0, 0);
-        if (rest > 0)
-        {
-            if (plan.StillAir(isWarmer) is not { } use)
-            {
-                return ConvectionStatus.NoCorrelation;
-            }
-
-            if (!sum.Use(use, Math.Abs(sum.Difference), out still))
-            {
-                return ConvectionStatus.OutOfRangeRefused;
-            }
-        }
-
-        double share = weights == 0 ? 0 : (1 - rest) / weights;
-        double coefficient = (rest * still.Coefficient) + (share * heated);
-        double sensitivity = (rest * still.Sensitivity) + (share * heatedSensitivity);
-        if (minimumConductance > 0)
-        {
-            double raised = WithMinimum(coefficient);
-            sum.Flags |= raised > 1.001 * coefficient ? ConvectionFlags.MinimumConductance : ConvectionFlags.None;
-            sensitivity *= Math.Pow(coefficient / raised, MinimumExponent - 1);
-            coefficient = raised;
-        }
-
-        double slope = coefficient + sensitivity;
-        sum.BuoyantCoefficient = coefficient;
-        sum.Buoyant = new Flux(coefficient * sum.Difference, slope, -slope, 0);
-        sum.MixedWeight = weights == 0 ? 0 : (1 - rest) * sum.MixedWeight / weights;
-        return ConvectionStatus.Valid;
+        lanes[DeviceLanes.Flow] = state.FlowCubicMetresPerSecond;
+        lanes[DeviceLanes.Speed] = state.SpeedMetresPerSecond;
+        lanes[DeviceLanes.Air] = state.AirCelsius;
+        lanes[DeviceLanes.Output] = state.OutputFraction;
     }
 
-    private double WithMinimum(double coefficient)
-        => Math.Pow(Math.Pow(coefficient, MinimumExponent) + Math.Pow(minimumConductance, MinimumExponent), 1.0 / MinimumExponent);
+    private static ConvectionStatus Worse(ConvectionStatus known, ConvectionStatus next) => known == ConvectionStatus.Valid ? next : known;
 
-    private ConvectionStatus AddForced(ref FluxSum sum, double surfaceCelsius, double roomCelsius, DeviceStates devices)
+    private static ConvectionStatus Check(double value, double lowest, double highest)
+        => double.IsNaN(value) || double.IsInfinity(value) ? ConvectionStatus.NotFinite
+            : value < lowest || value > highest ? ConvectionStatus.Unphysical
+            : ConvectionStatus.Valid;
+
+    private static FlowRegime Regime(in Kernel.Outcome sum)
     {
-        foreach (ForcedPlan forced in plan.Forced)
-        {
-            DeviceState state = devices[forced.Device];
-            double driving = forced.DrivingValue(state);
-            if (driving > 0
-                && (!AddForced(ref sum, forced.Stream, forced.On(isWarmer: true), isWarmer: true, driving, state, surfaceCelsius, roomCelsius)
-                    || !AddForced(ref sum, forced.Stream, forced.On(isWarmer: false), isWarmer: false, driving, state, surfaceCelsius, roomCelsius)))
-            {
-                return ConvectionStatus.OutOfRangeRefused;
-            }
-        }
-
-        return ConvectionStatus.Valid;
-    }
-
-    /// <summary>One device's law for one side, where the surface is on that side of the law's own reference.</summary>
-    private bool AddForced(
-        ref FluxSum sum, StreamDirection stream, LawUse? use, bool isWarmer, double driving, DeviceState state, double surfaceCelsius, double roomCelsius)
-    {
-        if (use is null)
-        {
-            return true;
-        }
-
-        ReferenceTemperature reference = Effective(use.Reference, state);
-        double difference = surfaceCelsius - (reference == ReferenceTemperature.RoomAir ? roomCelsius : state.AirCelsius);
-        if (isWarmer != (difference >= 0))
-        {
-            return true;
-        }
-
-        if (!sum.Use(use, driving, out LawValue law))
-        {
-            return false;
-        }
-
-        double h = law.Coefficient;
-        Flux flux = reference == ReferenceTemperature.RoomAir
-            ? new Flux(h * difference, h, -h, 0)
-            : new Flux(h * difference, h, 0, -h);
-        sum.AddForced(flux, h, reference, stream, blend);
-        sum.Flags |= reference == use.Reference ? ConvectionFlags.None : ConvectionFlags.ReferenceSubstituted;
-        if (use.ContainsBuoyancy)
-        {
-            sum.GiveWay(use.Lowest > 0 ? Crossfade.Weight(driving, 0, use.Lowest) : 1);
-        }
-
-        return true;
-    }
-
-    /// <summary>The reference that the state can serve: room air where it holds neither local, outlet nor free-stream temperature.</summary>
-    private static ReferenceTemperature Effective(ReferenceTemperature reference, DeviceState state)
-        => reference == ReferenceTemperature.SupplyAir ? reference
-            : reference == ReferenceTemperature.FreeStream && !double.IsNaN(state.AirCelsius) ? reference
-            : ReferenceTemperature.RoomAir;
-
-    private ConvectionResult Finish(FluxSum sum, bool isWarmer, DeviceStates devices)
-    {
-        Flux assisting = sum.Assisting(blend), opposing = sum.Opposing(blend), transverse = sum.Transverse(blend);
-        Flux total = FluxBlend.Assisting(sum.Buoyant, assisting, blend.AssistingExponent, blend.OpposingExponent);
-        total = FluxBlend.Opposing(total, opposing, blend.OpposingExponent, blend.OpposingFloor, blend.JoinsKinks);
-        total = FluxBlend.Assisting(total, transverse, blend.TransverseExponent, blend.OpposingExponent);
-        Flux forced = FluxSum.Pool(FluxSum.Pool(assisting, opposing, blend), transverse, blend);
-        foreach (GapPlan gap in plan.Gaps)
-        {
-            sum.Flags |= gap.IsOn(isWarmer) && (gap.Device < 0 || IsRunning(devices[gap.Device])) ? ConvectionFlags.GapInEvidence : ConvectionFlags.None;
-        }
-
-        bool opposite = sum.Buoyant.Value * forced.Value < 0;
-        sum.Flags |= opposite || sum.HasOppositeDevices ? ConvectionFlags.OppositeFluxes : ConvectionFlags.None;
-        return new ConvectionResult(
-            total,
-            sum.Buoyant,
-            forced,
-            sum.Difference,
-            sum.BuoyantCoefficient,
-            sum.ForcedCoefficient,
-            sum.ForcedReference,
-            Regime(sum, forced.Value, assisting.Value, opposing.Value, transverse.Value),
-            sum.Flags,
-            plan.Ids,
-            sum.Used);
-    }
-
-    private static FlowRegime Regime(FluxSum sum, double forced, double assisting, double opposing, double transverse)
-    {
-        double size = Math.Abs(sum.Buoyant.Value) + Math.Abs(forced);
+        double buoyant = sum.Buoyant.Value.Value, forced = sum.Forced.Value;
+        double size = Math.Abs(buoyant) + Math.Abs(forced);
         double share = size == 0 ? 0 : Math.Abs(forced) / size;
-        double leader = Math.Max(Math.Abs(assisting), Math.Max(Math.Abs(opposing), Math.Abs(transverse)));
-        return sum.MixedWeight > 0.5 ? FlowRegime.MixedAsMeasured
+        double opposing = Math.Abs(sum.Opposing.Value), transverse = Math.Abs(sum.Transverse.Value);
+        double leader = Math.Max(Math.Abs(sum.Assisting.Value), Math.Max(opposing, transverse));
+        return sum.MixedWeight.Value > 0.5 ? FlowRegime.MixedAsMeasured
             : share <= BuoyantUpTo ? FlowRegime.Buoyant
             : share >= ForcedFrom ? FlowRegime.Forced
-            : sum.Buoyant.Value * forced < 0 ? FlowRegime.MixedOppositeFluxes
-            : leader == Math.Abs(transverse) ? FlowRegime.MixedTransverse
-            : leader == Math.Abs(opposing) ? FlowRegime.MixedOpposing
+            : buoyant * forced < 0 ? FlowRegime.MixedOppositeFluxes
+            : leader == transverse ? FlowRegime.MixedTransverse
+            : leader == opposing ? FlowRegime.MixedOpposing
             : FlowRegime.MixedAssisting;
+    }
+
+    private ConvectionResult Result(in Kernel.Outcome sum, double difference, Remarks remarks)
+    {
+        double buoyant = sum.Buoyant.Value.Value, forced = sum.Forced.Value;
+        ConvectionFlags flags = remarks.Flags;
+        flags |= buoyant * forced < 0 || ScalarLane.Any(sum.HasOppositeDevices) ? ConvectionFlags.OppositeFluxes : ConvectionFlags.None;
+        flags |= sum.CoefficientBeforeForced.Value < MinimumTells * shape.MinimumConductance ? ConvectionFlags.MinimumConductance : ConvectionFlags.None;
+        return new ConvectionResult(
+            new Flux(sum.Total.Value.Value, sum.Total.Surface.Value, sum.Total.Room.Value, sum.Total.Supply.Value),
+            buoyant,
+            forced,
+            difference,
+            sum.BuoyantCoefficient.Value,
+            sum.ForcedCoefficient.Value,
+            (ReferenceTemperature)(int)sum.ForcedReference.Value,
+            Regime(sum),
+            flags,
+            plan.Ids,
+            remarks.Used);
     }
 }

@@ -84,6 +84,68 @@ internal sealed class SurfacePlan
 
     public LawUse? StillAir(bool isWarmer) => isWarmer ? warmer : cooler;
 
+    /// <summary>What has to be said about a state that is not impossible: laws in use, flags, and whether the policy refuses it.</summary>
+    public Remarks Remark(double surfaceCelsius, double roomCelsius, DeviceStates devices, double heaterRamp)
+    {
+        var remarks = new Remarks();
+        double difference = surfaceCelsius - roomCelsius, size = Math.Abs(difference);
+        bool isWarmer = difference >= 0, needsStill = true;
+        foreach (HeaterPlan heater in Heaters)
+        {
+            double weight = HeaterPlan.Weight(devices[heater.Device].OutputFraction, heaterRamp);
+            if (weight > 0 && heater.On(isWarmer) is { } use)
+            {
+                needsStill &= weight < 1;
+                remarks.Refuse(!use.Remark(size, ref remarks));
+            }
+        }
+
+        if (needsStill)
+        {
+            if (StillAir(isWarmer) is { } still)
+            {
+                remarks.Refuse(!still.Remark(size, ref remarks));
+            }
+            else
+            {
+                remarks.Status = ConvectionStatus.NoCorrelation;
+            }
+        }
+
+        foreach (ForcedPlan forced in Forced)
+        {
+            DeviceState state = devices[forced.Device];
+            double driving = forced.DrivingValue(state);
+            if (driving > 0)
+            {
+                Remark(forced.On(isWarmer: true), isWarmer: true, driving, state, surfaceCelsius, roomCelsius, ref remarks);
+                Remark(forced.On(isWarmer: false), isWarmer: false, driving, state, surfaceCelsius, roomCelsius, ref remarks);
+            }
+        }
+
+        foreach (GapPlan gap in Gaps)
+        {
+            remarks.Flags |= gap.IsOn(isWarmer) && (gap.Device < 0 || devices[gap.Device].IsRunning) ? ConvectionFlags.GapInEvidence : ConvectionFlags.None;
+        }
+
+        return remarks;
+    }
+
+    private static void Remark(LawUse? use, bool isWarmer, double driving, DeviceState state, double surfaceCelsius, double roomCelsius, ref Remarks remarks)
+    {
+        if (use is null)
+        {
+            return;
+        }
+
+        bool isGiven = use.Reference == ReferenceTemperature.SupplyAir || (use.Reference == ReferenceTemperature.FreeStream && !double.IsNaN(state.AirCelsius));
+        if (isWarmer == (surfaceCelsius - (isGiven ? state.AirCelsius : roomCelsius) >= 0))
+        {
+            remarks.Refuse(!use.Remark(driving, ref remarks));
+            remarks.Flags |= isGiven || use.Reference == ReferenceTemperature.RoomAir ? ConvectionFlags.None : ConvectionFlags.ReferenceSubstituted;
+        }
+    }
+
     private (LawUse? Warmer, LawUse? Cooler) Uses(PartKind kind, FlowDescriptor? device)
     {
         LawUse? warm = null, cool = null;

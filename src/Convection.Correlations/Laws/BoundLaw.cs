@@ -1,4 +1,5 @@
 using System;
+using System.Collections.Generic;
 
 namespace Convection.Correlations.Laws;
 
@@ -12,8 +13,7 @@ public sealed class BoundLaw
     internal const double JointHalfWidth = 0.02;
 
     private readonly NormalForm[] pieces;
-    private readonly double[] joints;
-    private readonly Func<double, LawValue>? code;
+    private readonly (double Low, double High)[] bands;
 
     internal BoundLaw(DrivingVariable drivenBy, NormalForm piece)
         : this(drivenBy, [piece], [])
@@ -24,12 +24,19 @@ public sealed class BoundLaw
     {
         DrivenBy = drivenBy;
         this.pieces = pieces;
-        this.joints = joints;
+        Joints = joints;
+        bands = new (double Low, double High)[joints.Length];
+        for (int i = 0; i < joints.Length; i++)
+        {
+            bands[i] = (
+                Math.Max(joints[i] * (1 - JointHalfWidth), i == 0 ? 0 : Math.Sqrt(joints[i - 1] * joints[i])),
+                Math.Min(joints[i] * (1 + JointHalfWidth), i + 1 == joints.Length ? double.PositiveInfinity : Math.Sqrt(joints[i] * joints[i + 1])));
+        }
     }
 
     internal BoundLaw(DrivingVariable drivenBy, Func<double, LawValue> code)
         : this(drivenBy, [], [])
-        => this.code = code;
+        => Code = code;
 
     /// <summary>What the coefficient depends on.</summary>
     public DrivingVariable DrivenBy { get; }
@@ -44,15 +51,14 @@ public sealed class BoundLaw
             return LawValue.NotANumber;
         }
 
-        if (code is not null)
+        if (Code is not null)
         {
-            return code(x);
+            return Code(x);
         }
 
-        for (int i = 0; i < joints.Length; i++)
+        for (int i = 0; i < bands.Length; i++)
         {
-            double low = Math.Max(joints[i] * (1 - JointHalfWidth), i == 0 ? 0 : Math.Sqrt(joints[i - 1] * joints[i]));
-            double high = Math.Min(joints[i] * (1 + JointHalfWidth), i + 1 == joints.Length ? double.PositiveInfinity : Math.Sqrt(joints[i] * joints[i + 1]));
+            (double low, double high) = bands[i];
             if (x < low)
             {
                 return pieces[i].Evaluate(x);
@@ -66,6 +72,17 @@ public sealed class BoundLaw
 
         return pieces[pieces.Length - 1].Evaluate(x);
     }
+
+    internal IReadOnlyList<NormalForm> Pieces => pieces;
+
+    /// <summary>Where the pieces meet, as published.</summary>
+    internal double[] Joints { get; }
+
+    /// <summary>Where each piece passes into the next.</summary>
+    internal IReadOnlyList<(double Low, double High)> Bands => bands;
+
+    /// <summary>The law as code; null for one of pieces.</summary>
+    internal Func<double, LawValue>? Code { get; }
 
     internal NormalForm SinglePiece => pieces.Length == 1
         ? pieces[0]

@@ -11,8 +11,6 @@ namespace Convection.Correlations.Laws;
 /// </remarks>
 internal readonly struct NormalForm
 {
-    private readonly double a1, n1, a2, n2, m;
-
     public NormalForm(double a1, double n1)
         : this(a1, n1, 0, 0, 1)
     {
@@ -20,27 +18,37 @@ internal readonly struct NormalForm
 
     public NormalForm(double a1, double n1, double a2, double n2, double m)
     {
-        this.a1 = a1;
-        this.n1 = n1;
-        this.a2 = a2;
-        this.n2 = n2;
-        this.m = m;
+        A1 = a1;
+        N1 = n1;
+        A2 = a2;
+        N2 = n2;
+        M = m;
     }
 
-    public NormalForm Times(double factor) => new(a1 * factor, n1, a2 * factor, n2, m);
+    public double A1 { get; }
+
+    public double N1 { get; }
+
+    public double A2 { get; }
+
+    public double N2 { get; }
+
+    public double M { get; }
+
+    public NormalForm Times(double factor) => new(A1 * factor, N1, A2 * factor, N2, M);
 
     public LawValue Evaluate(double x)
     {
-        double first = a1 * Math.Pow(x, n1);
-        if (a2 == 0)
+        double first = A1 * Math.Pow(x, N1);
+        if (A2 == 0)
         {
-            return new LawValue(first, n1 * first);
+            return new LawValue(first, N1 * first);
         }
 
-        double second = a2 * Math.Pow(x, n2);
-        if (m == 1)
+        double second = A2 * Math.Pow(x, N2);
+        if (M == 1)
         {
-            return new LawValue(first + second, (n1 * first) + (n2 * second));
+            return new LawValue(first + second, (N1 * first) + (N2 * second));
         }
 
         double larger = Math.Max(first, second);
@@ -50,8 +58,8 @@ internal readonly struct NormalForm
         }
 
         // Scaled by the larger term, so that a high power neither overflows nor vanishes.
-        double p1 = Math.Pow(first / larger, m), p2 = Math.Pow(second / larger, m);
-        double h = larger * Math.Pow(p1 + p2, 1 / m);
-        return new LawValue(h, h * ((n1 * p1) + (n2 * p2)) / (p1 + p2));
+        double p1 = Math.Pow(first / larger, M), p2 = Math.Pow(second / larger, M);
+        double h = larger * Math.Pow(p1 + p2, 1 / M);
+        return new LawValue(h, h * ((N1 * p1) + (N2 * p2)) / (p1 + p2));
     }
 }

@@ -95,6 +95,12 @@ public sealed record ConvectionPolicy
     }
 
     /// <summary>
+    /// True (the default) passes the pieces of a piecewise law into one another over 2 % of the driving variable to either side of
+    /// where they meet; less where two joints are close. False takes the law exactly as published, its jumps included.
+    /// </summary>
+    public bool JoinsPieces { get; init; } = true;
+
+    /// <summary>
     /// True (the default) scales dimensional formulas, which are taken to embed dry air of 22 °C at sea level, to the temperature,
     /// pressure and humidity of the room's air by their property groups.
     /// </summary>

@@ -64,24 +64,21 @@ internal sealed class LawLadder
     /// <summary>Band over which law i passes into law i + 1.</summary>
     public (double Low, double High) Passage(int i) => passages[i];
 
-    /// <summary>The law at x, and which of the ladder's laws take part in it: the lower index, and the weight of the next one.</summary>
-    public LawValue Evaluate(double x, out int lower, out double weightOfNext)
+    /// <summary>Which of the ladder's laws take part at x: the index of the lower one, and the weight of the next.</summary>
+    public int Find(double x, out double weightOfNext)
     {
-        for (lower = 0; lower < passages.Length; lower++)
+        for (int lower = 0; lower < passages.Length; lower++)
         {
             (double low, double high) = passages[lower];
             if (x < high)
             {
                 weightOfNext = Crossfade.Weight(x, low, high);
-                LawValue below = rungs[lower].Law.Law.Evaluate(x);
-                return weightOfNext == 0
-                    ? below
-                    : Crossfade.Between(below, rungs[lower + 1].Law.Law.Evaluate(x), x, low, high);
+                return lower;
             }
         }
 
         weightOfNext = 0;
-        return rungs[lower].Law.Law.Evaluate(x);
+        return passages.Length;
     }
 
     private static void Try(List<Rung> rungs, List<Rung> longer)

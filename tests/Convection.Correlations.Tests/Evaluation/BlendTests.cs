@@ -1,7 +1,10 @@
 using System;
 using Convection.Correlations.Evaluation;
+using Convection.Correlations.Evaluation.Kernels;
+using Convection.Correlations.Laws;
 using CsCheck;
 using Xunit;
+using Kernel = Convection.Correlations.Evaluation.Kernels.FluxKernel<Convection.Correlations.Evaluation.Kernels.ScalarLane>;
 
 namespace Convection.Correlations.Tests.Evaluation;
 
@@ -14,7 +17,7 @@ public class BlendTests
     // forced and 22.42 natural, assisting, exponent 3, make 37.55.
     [Fact]
     public void Assisting_TextbookExample_Agrees()
-        => Assert.Equal(37.55, FluxBlend.Assisting(Part(34.67), Part(22.42), 3, 3).Value, 0.02);
+        => Assert.Equal(37.55, Assisting(Part(34.67), Part(22.42), 3, 3).Value, 0.02);
 
     // Worked apart from this code for parts of 2 and 3: S.W. Churchill, AIChE Journal 23(1), 10-16, 1977 (quoted): exponents 3 and 4,
     // assisting; 7/2 for transverse flow over horizontal plates (recalled, high); D.L. Siebers et al., 1983: 3.2 (recalled, high).
@@ -25,14 +28,14 @@ public class BlendTests
     [InlineData(3.2, 3.23522)]
     public void Assisting_PublishedExponents_Agree(double n, double expected)
     {
-        Assert.Equal(expected, FluxBlend.Assisting(Part(2), Part(3), n, 3).Value, 6e-6);
-        Assert.Equal(-expected, FluxBlend.Assisting(Part(-3), Part(-2), n, 3).Value, 6e-6);
+        Assert.Equal(expected, Assisting(Part(2), Part(3), n, 3).Value, 6e-6);
+        Assert.Equal(-expected, Assisting(Part(-3), Part(-2), n, 3).Value, 6e-6);
     }
 
     // Churchill (1977): the cubes subtract in opposing flow (the value worked apart from this code).
     [Fact]
     public void Opposing_FarApart_CubesSubtract()
-        => Assert.Equal(2.66840, FluxBlend.Opposing(Part(2), Part(3), 3, 0.8, isJoined: false).Value, 6e-6);
+        => Assert.Equal(2.66840, Opposing(Part(2), Part(3), 3, 0.8, isJoined: false).Value, 6e-6);
 
     // I. Beausoleil-Morrison, Energy and Buildings 33(4), 351-361, 2001 (recalled, high): never below 0.8 of the larger part.
     [Theory]
@@ -40,14 +43,14 @@ public class BlendTests
     [InlineData(10, 9)]
     [InlineData(-9, -10)]
     public void Opposing_NearlyEqual_LeavesTheFloor(double a, double b)
-        => Assert.Equal(0.8 * 10 * Math.Sign(a), FluxBlend.Opposing(Part(a), Part(b), 3, 0.8, isJoined: false).Value, 1e-12);
+        => Assert.Equal(0.8 * 10 * Math.Sign(a), Opposing(Part(a), Part(b), 3, 0.8, isJoined: false).Value, 1e-12);
 
     [Fact]
     public void OppositeHeat_Equal_Balances_AndUnequal_LeavesLessThanTheLarger()
     {
-        Assert.Equal(0, FluxBlend.Counter(Part(7), Part(-7), 3).Value, 1e-12);
-        Assert.InRange(FluxBlend.Counter(Part(7), Part(-3), 3).Value, 0, 7);
-        Assert.Equal(7, FluxBlend.Counter(Part(7), Part(0), 3).Value, 1e-12);
+        Assert.Equal(0, Counter(Part(7), Part(-7), 3).Value, 1e-12);
+        Assert.InRange(Counter(Part(7), Part(-3), 3).Value, 0, 7);
+        Assert.Equal(7, Counter(Part(7), Part(0), 3).Value, 1e-12);
     }
 
     [Theory]
@@ -61,10 +64,9 @@ public class BlendTests
                 double n = exponent, opposing = Math.Max(exponent, 2);
                 foreach (Func<Flux, Flux, Flux> blend in new Func<Flux, Flux, Flux>[]
                 {
-                    (x, y) => FluxBlend.Assisting(x, y, n, opposing),
-                    (x, y) => FluxBlend.Opposing(x, y, opposing, 0.8, isJoined: false),
-                    (x, y) => FluxBlend.Opposing(x, y, opposing, 0.8, isJoined: true),
-                    (x, y) => FluxBlend.Counter(x, y, opposing),
+                    (x, y) => Assisting(x, y, n, opposing),
+                    (x, y) => Opposing(x, y, opposing, 0.8, isJoined: false),
+                    (x, y) => Opposing(x, y, opposing, 0.8, isJoined: true),
                 })
                 {
                     double value = blend(a, b).Value;
@@ -88,7 +90,7 @@ public class BlendTests
         double steepest = 0;
         for (double a = -10; a <= 0; a += 0.001)
         {
-            double slope = FluxBlend.Counter(new Flux(a, 1, 0, 0), new Flux(1, 0, 0, 0), 3).Surface;
+            double slope = Counter(new Flux(a, 1, 0, 0), new Flux(1, 0, 0, 0), 3).Surface;
             Assert.True(slope >= 0);
             steepest = Math.Max(steepest, slope);
         }
@@ -108,8 +110,8 @@ public class BlendTests
         for (int i = 0; i <= 40_000; i++)
         {
             double b = i / 20_000.0;
-            Flux joined = FluxBlend.Opposing(new Flux(1, 0, 0, 0), new Flux(b, 1, 0, 0), n, floor, isJoined: true);
-            double published = FluxBlend.Opposing(Part(1), Part(b), n, floor, isJoined: false).Value;
+            Flux joined = Opposing(new Flux(1, 0, 0, 0), new Flux(b, 1, 0, 0), n, floor, isJoined: true);
+            double published = Opposing(Part(1), Part(b), n, floor, isJoined: false).Value;
             double ratio = Math.Min(b, 1 / b), deviation = Math.Abs((joined.Value / published) - 1);
             largest = Math.Max(largest, deviation);
             if (Math.Abs(ratio - corner) > 0.0401 && ratio < 0.951)
@@ -126,4 +128,17 @@ public class BlendTests
     }
 
     private static Flux Part(double value) => new(value, 0, 0, 0);
+
+    private static Flux Assisting(Flux a, Flux b, double n, double opposing)
+        => From(Kernel.Add(To(a), To(b), new PowerPair(n), new BlendShape(new BlendRule { OpposingExponent = opposing })));
+
+    private static Flux Opposing(Flux a, Flux b, double n, double floor, bool isJoined)
+        => From(Kernel.Oppose(To(a), To(b), new BlendShape(new BlendRule { OpposingExponent = n, OpposingFloor = floor, JoinsKinks = isJoined })));
+
+    /// <summary>Fluxes of opposite heat: every rule takes the same mean of them.</summary>
+    private static Flux Counter(Flux a, Flux b, double n) => Assisting(a, b, 3, n);
+
+    private static Kernel.Flux To(Flux f) => new(new(f.Value), new(f.Surface), new(f.Room), new(f.Supply));
+
+    private static Flux From(Kernel.Flux f) => new(f.Value.Value, f.Surface.Value, f.Room.Value, f.Supply.Value);
 }
